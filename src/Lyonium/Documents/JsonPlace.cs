@@ -1,0 +1,221 @@
+using System;
+using System.Collections.Generic;
+using System.Linq;
+using System.Text.Json;
+using Lyonium.Faults;
+using Lyonium.Quantities;
+
+namespace Lyonium.Documents;
+
+/// <summary>A JSON value and where it stands. Reads it as what the format wants there, or tells the fault.</summary>
+internal sealed class JsonPlace
+{
+    private readonly JsonElement _element;
+    private readonly FaultList _faults;
+
+    public JsonPlace(JsonElement element, string path, FaultList faults)
+    {
+        _element = element;
+        Path = path;
+        _faults = faults;
+    }
+
+    public string Path { get; }
+
+    public FaultList Faults => _faults;
+
+    public bool IsObject => _element.ValueKind == JsonValueKind.Object;
+
+    public bool IsText => _element.ValueKind == JsonValueKind.String;
+
+    /// <summary>The value as it is written.</summary>
+    public string RawText => _element.GetRawText();
+
+    /// <summary>The properties of an object; each one that is not known, or stands twice, is told.</summary>
+    public IReadOnlyDictionary<string, JsonPlace> Properties(params string[] known)
+    {
+        var properties = new Dictionary<string, JsonPlace>(StringComparer.Ordinal);
+        if (!Is(JsonValueKind.Object, "an object"))
+        {
+            return properties;
+        }
+
+        foreach (var property in _element.EnumerateObject())
+        {
+            var path = Path + Step(property.Name);
+            if (known.Length > 0 && !known.Contains(property.Name, StringComparer.Ordinal))
+            {
+                _faults.Add(FaultKinds.UnknownProperty, path, property.Name, ("known", string.Join(", ", known)));
+            }
+            else if (properties.ContainsKey(property.Name))
+            {
+                _faults.Add(FaultKinds.DuplicateProperty, path, property.Name);
+            }
+            else
+            {
+                properties.Add(property.Name, new JsonPlace(property.Value, path, _faults));
+            }
+        }
+
+        return properties;
+    }
+
+    /// <summary>One property of an object, whatever else stands in it; <see langword="null"/> where it is not there.</summary>
+    public JsonPlace? Find(string name) =>
+        IsObject && _element.TryGetProperty(name, out var value) ? new JsonPlace(value, Path + Step(name), _faults) : null;
+
+    /// <summary>The items of an array.</summary>
+    public IReadOnlyList<JsonPlace> Items()
+    {
+        if (!Is(JsonValueKind.Array, "an array"))
+        {
+            return [];
+        }
+
+        var items = new List<JsonPlace>(_element.GetArrayLength());
+        foreach (var item in _element.EnumerateArray())
+        {
+            items.Add(new JsonPlace(item, $"{Path}[{items.Count}]", _faults));
+        }
+
+        return items;
+    }
+
+    /// <summary>How many items an array has; 0 for anything else.</summary>
+    public int ItemCount => _element.ValueKind == JsonValueKind.Array ? _element.GetArrayLength() : 0;
+
+    public string? Text() => Is(JsonValueKind.String, "a text") ? TextValue() : null;
+
+    public double? Number()
+    {
+        if (!Is(JsonValueKind.Number, "a number"))
+        {
+            return null;
+        }
+
+        var value = NumberText.Parse(_element.GetRawText());
+        if (!double.IsInfinity(value))
+        {
+            return value;
+        }
+
+        _faults.Add(FaultKinds.NotFinite, Path, _element.GetRawText(), ("example", "1.5"));
+        return null;
+    }
+
+    public int? WholeNumber()
+    {
+        if (Number() is not double value)
+        {
+            return null;
+        }
+
+        if (value == Math.Floor(value) && Math.Abs(value) <= 1_000_000)
+        {
+            return (int)value;
+        }
+
+        _faults.Add(FaultKinds.WrongType, Path, RawText, ("expected", "a whole number"), ("actual", "another number"));
+        return null;
+    }
+
+    /// <summary>A quantity: <c>"12.5 mL"</c>, or an object with value, unit and perhaps a standard uncertainty.</summary>
+    public Measure? Measure(Dimension dimension)
+    {
+        if (IsText)
+        {
+            return TextValue() is { } text ? MeasureReader.Read(text, dimension, Path, _faults) : null;
+        }
+
+        if (!IsObject)
+        {
+            Is(JsonValueKind.String, "a quantity (a text such as \"" + DimensionText.ExampleOf(dimension) + "\", or an object with value and unit)");
+            return null;
+        }
+
+        var properties = Properties("value", "unit", "standardUncertainty");
+        var value = Need(properties, "value")?.Number();
+        var unit = Need(properties, "unit")?.Text();
+        double? uncertainty = null;
+        if (properties.TryGetValue("standardUncertainty", out var place))
+        {
+            uncertainty = place.Number();
+            if (uncertainty is null)
+            {
+                return null;
+            }
+        }
+
+        return value is double number && unit is not null
+            ? MeasureReader.Read(number, unit, dimension, Path, NumberText.Shortest(number) + " " + unit, _faults, uncertainty)
+            : null;
+    }
+
+    /// <summary>The dimension that a quantity's unit has, where it can be told.</summary>
+    public Dimension? MeasuredDimension()
+    {
+        if (IsText)
+        {
+            return TextValue() is { } text ? MeasureReader.DimensionOf(text) : null;
+        }
+
+        return IsObject && _element.TryGetProperty("unit", out var unit) && unit.ValueKind == JsonValueKind.String
+            ? MeasureReader.DimensionOf(unit.GetString()!)
+            : null;
+    }
+
+    /// <summary>A property that must be there.</summary>
+    public JsonPlace? Need(IReadOnlyDictionary<string, JsonPlace> properties, string name)
+    {
+        if (properties.TryGetValue(name, out var place))
+        {
+            return place;
+        }
+
+        if (IsObject)
+        {
+            _faults.Add(FaultKinds.MissingProperty, Path, "", ("property", name));
+        }
+
+        return null;
+    }
+
+    // Half a surrogate pair is legal JSON and no text.
+    private string? TextValue()
+    {
+        try
+        {
+            return _element.GetString();
+        }
+        catch (InvalidOperationException)
+        {
+            _faults.Add(FaultKinds.WrongType, Path, RawText, ("expected", "a text in Unicode"), ("actual", "half a surrogate pair"));
+            return null;
+        }
+    }
+
+    private bool Is(JsonValueKind kind, string expected)
+    {
+        if (_element.ValueKind == kind)
+        {
+            return true;
+        }
+
+        var actual = _element.ValueKind switch
+        {
+            JsonValueKind.Object => "an object",
+            JsonValueKind.Array => "an array",
+            JsonValueKind.String => "a text",
+            JsonValueKind.Number => "a number",
+            JsonValueKind.Null => "null",
+            _ => "true or false",
+        };
+        _faults.Add(FaultKinds.WrongType, Path, _element.GetRawText(), ("expected", expected), ("actual", actual));
+        return false;
+    }
+
+    private static string Step(string name) =>
+        name.Length > 0 && name.All(c => c is (>= 'a' and <= 'z') or (>= 'A' and <= 'Z') or (>= '0' and <= '9') or '_')
+            ? "." + name
+            : "['" + (name.Length > 60 ? name.Substring(0, 60) + "…" : name).Replace("'", "\\'") + "']";
+}

@@ -1,0 +1,304 @@
+using System;
+
+namespace Lyonium.Equilibria;
+
+/// <summary>The full charge balance of an equilibrium of ladders at a given hydrogen-ion activity.</summary>
+/// <remarks>
+/// <para>
+/// Each ladder is counted from the rung that most of it stands on: its charge is that rung's charge times the total (summed exactly,
+/// over all ladders and spectators) plus the small rest that stands on other rungs. So the balance keeps its relative precision in
+/// strong excess, at both ends of the scale, and where large charges cancel.
+/// </para>
+/// <para>
+/// The activity coefficients and the ionic strength are made consistent at every evaluation, so the balance is a function of the
+/// hydrogen-ion activity alone.
+/// </para>
+/// </remarks>
+internal ref struct LadderBalance
+{
+    private const int MostRounds = 200;
+
+    private readonly Equilibrium _equilibrium;
+    private readonly LadderSet _ladders;
+    private readonly IActivityModel _model;
+    private readonly double _ionProduct;
+    private readonly Span<double> _ratios;
+    private readonly Span<double> _log10Gammas;
+    private readonly Span<double> _nextLog10Gammas;
+    private readonly Span<double> _molalities;
+    private double _inverseGammaH;
+    private double _inverseGammaOH;
+    private double _gammasAt;
+
+    /// <summary>Starts from activity coefficients of one.</summary>
+    /// <param name="equilibrium">An equilibrium of ladders.</param>
+    /// <param name="model">The model of activity coefficients.</param>
+    /// <param name="buffer">Working space of at least <see cref="BufferLength"/>.</param>
+    public LadderBalance(Equilibrium equilibrium, IActivityModel model, Span<double> buffer)
+    {
+        _equilibrium = equilibrium;
+        _ladders = equilibrium.Ladders!;
+        _model = model;
+        _ionProduct = Math.Pow(10, -equilibrium.Solvent.PKw);
+        var species = equilibrium.SpeciesCount;
+        var rungs = _ladders.Species.Length;
+        _log10Gammas = buffer.Slice(0, species);
+        _nextLog10Gammas = buffer.Slice(species, species);
+        _molalities = buffer.Slice(2 * species, species);
+        _ratios = buffer.Slice(3 * species, rungs);
+        _log10Gammas.Clear();
+        _ladders.Ratio.AsSpan().CopyTo(_ratios);
+        for (var i = 0; i < _ladders.SpectatorSpecies.Length; i++)
+        {
+            _molalities[_ladders.SpectatorSpecies[i]] = _ladders.SpectatorTotal[i];
+        }
+
+        _inverseGammaH = 1;
+        _inverseGammaOH = 1;
+    }
+
+    /// <summary>The net charge, in mol/kg; it falls with pH.</summary>
+    public double Charge { get; private set; }
+
+    /// <summary>The part of the charge that grows in proportion to the hydrogen-ion activity, in mol/kg.</summary>
+    public double Rising { get; private set; }
+
+    /// <summary>The part of the charge that shrinks in inverse proportion to the hydrogen-ion activity, in mol/kg.</summary>
+    public double Falling { get; private set; }
+
+    /// <summary>Σ|z|m of what the totals fix, in mol/kg: how large the numbers are that the charge is a difference of.</summary>
+    public double FixedMagnitude { get; private set; }
+
+    /// <summary>The ionic strength, in mol/kg.</summary>
+    public double IonicStrength { get; private set; }
+
+    public readonly ReadOnlySpan<double> Molalities => _molalities;
+
+    public readonly ReadOnlySpan<double> Log10Gammas => _log10Gammas;
+
+    public static int BufferLength(Equilibrium equilibrium) =>
+        (3 * equilibrium.SpeciesCount) + equilibrium.Ladders!.Species.Length;
+
+    /// <summary>Evaluates the balance.</summary>
+    /// <param name="activity">The hydrogen-ion activity, above 0.</param>
+    /// <returns>
+    /// Whether the activity coefficients settled; if not, the model gave a number that is not finite or contradicts itself.
+    /// </returns>
+    public bool At(double activity)
+    {
+        double low = 0, high = double.PositiveInfinity, lastAt = double.NaN, lastMiss = double.NaN, change = double.PositiveInfinity;
+        for (var round = 0; round < MostRounds; round++)
+        {
+            Speciate(activity);
+            var miss = IonicStrength - _gammasAt;
+            if (round > 0 && change <= 1e-14 && Math.Abs(miss) <= 4e-16 * IonicStrength)
+            {
+                return true;
+            }
+
+            if (miss > 0)
+            {
+                low = _gammasAt;
+            }
+            else if (round > 0)
+            {
+                high = _gammasAt;
+            }
+
+            var next = Next(round, low, high, miss, lastAt, lastMiss);
+            lastAt = _gammasAt;
+            lastMiss = miss;
+            change = UseGammasAt(next);
+            if (change == 0)
+            {
+                return true;
+            }
+
+            if (double.IsNaN(change) || double.IsInfinity(change))
+            {
+                return false;
+            }
+
+            if (!double.IsInfinity(high) && high - low <= 4e-16 * high)
+            {
+                Speciate(activity);
+                return true;
+            }
+        }
+
+        return false;
+    }
+
+    // A secant on (ionic strength out) − (ionic strength in), kept inside the bracket that the misses give.
+    private readonly double Next(int round, double low, double high, double miss, double lastAt, double lastMiss)
+    {
+        var next = IonicStrength;
+        if (round > 1 && miss != lastMiss)
+        {
+            var secant = _gammasAt - (miss * (_gammasAt - lastAt) / (miss - lastMiss));
+            next = secant > 0.1 * next && secant < 10 * next ? secant : next;
+        }
+
+        if (round < 20 && next > low && next < high)
+        {
+            return next;
+        }
+
+        if (round < 2)
+        {
+            return next;
+        }
+
+        return double.IsInfinity(high) ? 2 * Math.Max(low, IonicStrength) : 0.5 * (low + high);
+    }
+
+    private double UseGammasAt(double ionicStrength)
+    {
+        _model.Log10Gammas(_equilibrium, ionicStrength, _molalities, _nextLog10Gammas);
+        double change = 0;
+        for (var i = 0; i < _log10Gammas.Length; i++)
+        {
+            var difference = Math.Abs(_nextLog10Gammas[i] - _log10Gammas[i]);
+            change = difference <= change ? change : difference;
+        }
+
+        _gammasAt = ionicStrength;
+        if (change == 0)
+        {
+            return 0;
+        }
+
+        _nextLog10Gammas.CopyTo(_log10Gammas);
+        _inverseGammaH = Math.Pow(10, -_log10Gammas[Equilibrium.HydrogenIon]);
+        _inverseGammaOH = Math.Pow(10, -_log10Gammas[Equilibrium.HydroxideIon]);
+        for (var i = 0; i < _ratios.Length; i++)
+        {
+            if (_ladders.Gap[i] > 0)
+            {
+                var shift = _log10Gammas[_ladders.Species[i - 1]] - _log10Gammas[_ladders.Species[i]];
+                _ratios[i] = Math.Pow(10, _ladders.Log10Ratio[i] + shift);
+            }
+        }
+
+        return change;
+    }
+
+    private void Speciate(double activity)
+    {
+        var hydrogen = activity * _inverseGammaH;
+        var hydroxide = _ionProduct / activity * _inverseGammaOH;
+        _molalities[Equilibrium.HydrogenIon] = hydrogen;
+        _molalities[Equilibrium.HydroxideIon] = hydroxide;
+        Rising = hydrogen;
+        Falling = hydroxide;
+        FixedMagnitude = _ladders.SpectatorChargeMagnitude;
+        var ionicStrength = _ladders.SpectatorIonicStrength + (0.5 * (hydrogen + hydroxide));
+        var fixedCharge = _ladders.SpectatorCharge;
+        var rest = hydrogen - hydroxide;
+        for (var ladder = 0; ladder < _ladders.Total.Length; ladder++)
+        {
+            var start = _ladders.Start[ladder];
+            var end = _ladders.Start[ladder + 1];
+            var total = _ladders.Total[ladder];
+            var most = Fill(start, end, activity);
+            var charge = _ladders.Charge[most];
+            double sum = 0, excess = 0, square = 0, chargeSquare = 0;
+            for (var i = start; i < end; i++)
+            {
+                var share = _molalities[_ladders.Species[i]];
+                var above = _ladders.Charge[i] - charge;
+                sum += share;
+                excess += above * share;
+                square += above * above * share;
+                chargeSquare += _ladders.Charge[i] * _ladders.Charge[i] * share;
+            }
+
+            excess /= sum;
+            var scale = total / sum;
+            for (var i = start; i < end; i++)
+            {
+                _molalities[_ladders.Species[i]] *= scale;
+            }
+
+            ionicStrength += 0.5 * chargeSquare * scale;
+            var slope = total * ((square / sum) - (excess * excess));
+            if (excess >= 0)
+            {
+                Rising += slope;
+            }
+            else
+            {
+                Falling += slope;
+            }
+
+            rest += total * excess;
+            fixedCharge.AddProduct(total, charge);
+            FixedMagnitude += Math.Abs(charge) * total;
+        }
+
+        IonicStrength = ionicStrength;
+        Charge = fixedCharge.Plus(rest);
+    }
+
+    // Leaves the rungs' amounts relative to each other in the molalities, and returns the rung with most.
+    private readonly int Fill(int start, int end, double activity)
+    {
+        const double tooLarge = 1e100;
+        const double tooSmall = 1e-200;
+        double share = 1, largest = 1;
+        var most = start;
+        _molalities[_ladders.Species[start]] = 1;
+        for (var i = start + 1; i < end; i++)
+        {
+            share *= _ratios[i] * activity;
+            for (var gap = _ladders.Gap[i]; gap > 1; gap--)
+            {
+                share *= activity;
+            }
+
+            if (share is < tooSmall or > tooLarge)
+            {
+                return FillByLogarithms(start, end, activity);
+            }
+
+            _molalities[_ladders.Species[i]] = share;
+            if (share > largest)
+            {
+                largest = share;
+                most = i;
+            }
+        }
+
+        return most;
+    }
+
+    // The same where a product of ratios leaves the range of a double.
+    private readonly int FillByLogarithms(int start, int end, double activity)
+    {
+        var log10Activity = Math.Log10(activity);
+        double log = 0, largest = 0;
+        var most = start;
+        for (var i = start; i < end; i++)
+        {
+            if (i > start)
+            {
+                log += Math.Log10(_ratios[i]) + (_ladders.Gap[i] * log10Activity);
+            }
+
+            _molalities[_ladders.Species[i]] = log;
+            if (log > largest)
+            {
+                largest = log;
+                most = i;
+            }
+        }
+
+        for (var i = start; i < end; i++)
+        {
+            ref var share = ref _molalities[_ladders.Species[i]];
+            share = Math.Pow(10, share - largest);
+        }
+
+        return most;
+    }
+}

@@ -1,0 +1,124 @@
+using System;
+using System.Collections.Generic;
+using System.Linq;
+using Lyonium.Recipes;
+
+namespace Lyonium.Predictions;
+
+/// <summary>Gathers what a prediction takes for granted, the method's own assumptions first.</summary>
+internal sealed class AssumptionList(SolvedMixture answer, Predictor predictor, double waterErrorInPH)
+{
+    private const string CommonPractice = "common practice";
+    private const string WholeMixture = "mixture";
+
+    public IReadOnlyList<Assumption> ToList() =>
+        OfTheMethod()
+            .Concat(OfTheModel())
+            .Concat(OfTheConstants())
+            .Concat(OfTheWater())
+            .Concat(OfTheRecipe())
+            .ToArray();
+
+    private Mixture Mixture => answer.Modelled.Mixture;
+
+    private IEnumerable<Assumption> OfTheMethod()
+    {
+        foreach (var one in answer.Outcome.Assumptions)
+        {
+            var of = one.Component < 0 ? WholeMixture : answer.Modelled.Families[one.Component].Name;
+            yield return new Assumption(one.Code, of, one.Figure, one.Limit, one.Held, one.Basis);
+        }
+
+        const double finest = 1e-9;
+        if (answer.Outcome.InputResolution > finest)
+        {
+            yield return new Assumption(
+                "inputs-resolve-the-answer",
+                WholeMixture,
+                answer.Outcome.InputResolution,
+                finest,
+                Held: false,
+                "half a last digit of the amounts, as doubles, in pH");
+        }
+    }
+
+    private IEnumerable<Assumption> OfTheModel()
+    {
+        var ionicStrength = answer.Speciation.IonicStrengthMolPerKg;
+        var highest = predictor.ActivityModel.HighestIonicStrengthMolPerKg;
+        yield return new Assumption(
+            "ionic-strength-in-range", predictor.ActivityModel.Name, ionicStrength, highest, ionicStrength <= highest, predictor.ActivityModel.Source);
+
+        const double leastWater = 0.9;
+        var water = Mixture.WaterKg / Mixture.MassKg;
+        yield return new Assumption("water-is-the-solvent", WholeMixture, water, leastWater, water >= leastWater, CommonPractice);
+    }
+
+    private IEnumerable<Assumption> OfTheConstants()
+    {
+        foreach (var one in answer.Modelled.Constants.Where(one => one.Quantity == "pKa"))
+        {
+            if (one.Value.IonicStrengthMolPerKg > 0)
+            {
+                yield return new Assumption(
+                    "constant-carried-to-infinite-dilution",
+                    one.Id,
+                    one.Value.IonicStrengthMolPerKg,
+                    predictor.ActivityModel.HighestIonicStrengthMolPerKg,
+                    one.Value.IonicStrengthMolPerKg <= predictor.ActivityModel.HighestIonicStrengthMolPerKg,
+                    "published at this ionic strength; carried with " + predictor.ActivityModel.Name);
+            }
+
+            const double nearK = 0.5;
+            var away = Math.Abs((one.Value.TemperatureK ?? Mixture.TemperatureK) - Mixture.TemperatureK);
+            if (away > nearK)
+            {
+                yield return new Assumption(
+                    "constant-at-its-temperature", one.Id, away, nearK, Held: false, "published at another temperature, and used as it is");
+            }
+        }
+    }
+
+    private IEnumerable<Assumption> OfTheWater()
+    {
+        if (Mixture.EstimatedWaterKg > 0)
+        {
+            const double smallest = 0.005;
+            var estimated = Mixture.Parts.Where(part => part.EstimatedWaterKg > 0 || part.EstimatedVolumeL > 0)
+                .Select(part => part.Substance!.Name).Distinct(StringComparer.Ordinal);
+            yield return new Assumption(
+                "solute-volume-estimated",
+                string.Join(", ", estimated),
+                waterErrorInPH,
+                smallest,
+                waterErrorInPH <= smallest,
+                "0.5 ± 0.3 mL/g, common practice; the figure is what the 0.3 mL/g does to the pH");
+        }
+
+        foreach (var part in Mixture.Parts.Where(part => part.TableDensity is not null).GroupBy(part => part.Substance!.Id, StringComparer.Ordinal).Select(one => one.First()))
+        {
+            const double nearK = 5;
+            var away = Math.Abs((part.TableDensity!.TemperatureK ?? Mixture.Recipe.PreparedAtK) - Mixture.Recipe.PreparedAtK);
+            yield return new Assumption(
+                "density-from-the-table", part.Substance!.Name, away, nearK, away <= nearK, "kelvins between the table's density and the preparation");
+        }
+    }
+
+    private IEnumerable<Assumption> OfTheRecipe()
+    {
+        if (Mixture.Recipe.Temperature is null)
+        {
+            yield return new Assumption("temperature-default", WholeMixture, 25, null, Held: true, "not stated; 25 Cel taken");
+        }
+
+        if (Mixture.Recipe.PreparedAt is null)
+        {
+            yield return new Assumption("preparation-temperature-default", WholeMixture, 20, null, Held: true, "not stated; 20 Cel taken");
+        }
+
+        yield return new Assumption(
+            "closed-to-air", WholeMixture, null, null, Held: true, "taken for granted: no gas is taken up or given off");
+        yield return new Assumption(
+            "all-dissolved", WholeMixture, null, null, Held: true, "taken for granted: solubility is not checked");
+    }
+}

@@ -1,0 +1,75 @@
+using System;
+using System.Collections.Generic;
+using System.Globalization;
+using Lyonium.Equilibria;
+using Lyonium.Recipes;
+using UnitsNet;
+
+namespace Lyonium.Predictions;
+
+/// <summary>The answer, with its checks, cautions and evidence.</summary>
+/// <remarks>Immutable; safe to share between threads.</remarks>
+public sealed class Prediction
+{
+    internal Prediction(Mixture mixture, string method, string activityModel, double pH, Speciation speciation)
+    {
+        Mixture = mixture;
+        Method = method;
+        ActivityModel = activityModel;
+        PH = pH;
+        IonicStrengthMolPerKg = speciation.IonicStrengthMolPerKg;
+    }
+
+    /// <summary>What was mixed.</summary>
+    public Mixture Mixture { get; }
+
+    /// <summary>The recipe it was mixed from.</summary>
+    public Recipe Recipe => Mixture.Recipe;
+
+    /// <summary>The name of the method.</summary>
+    public string Method { get; }
+
+    /// <summary>The name of the model of activity coefficients.</summary>
+    public string ActivityModel { get; }
+
+    /// <summary>−log10 of the hydrogen-ion activity, molality scale.</summary>
+    public double PH { get; }
+
+    /// <summary>p[H]: −log10 of the hydrogen-ion concentration in mol/L, at the volume of preparation.</summary>
+    public required double PHydrogenConcentration { get; init; }
+
+    /// <summary>The pH to two decimals, as a report gives it.</summary>
+    public string Reported
+    {
+        get
+        {
+            var rounded = Math.Round(PH, 2, MidpointRounding.AwayFromZero) + 0.0;
+            return rounded.ToString("F2", CultureInfo.InvariantCulture);
+        }
+    }
+
+    /// <summary>The ionic strength, in mol/kg.</summary>
+    public double IonicStrengthMolPerKg { get; }
+
+    /// <summary>The ionic strength.</summary>
+    public Molality IonicStrength => Molality.FromMolesPerKilogram(IonicStrengthMolPerKg);
+
+    /// <summary>Every species: the two ions of water, then family by family from the least protonated form on.</summary>
+    public required IReadOnlyList<PredictedSpecies> Species { get; init; }
+
+    /// <summary>What was taken for granted.</summary>
+    public required IReadOnlyList<Assumption> Assumptions { get; init; }
+
+    /// <summary>The estimates of a method that repeats itself; empty for others.</summary>
+    public required IReadOnlyList<Iterate> Iterates { get; init; }
+
+    /// <summary>What can hurt someone who makes the mixture.</summary>
+    public required IReadOnlyList<Caution> Cautions { get; init; }
+
+    /// <summary>What the answer rests on.</summary>
+    public required Evidence Evidence { get; init; }
+
+    /// <summary>The reported pH in words.</summary>
+    /// <returns>Such as <c>pH 2.35</c>.</returns>
+    public override string ToString() => "pH " + Reported;
+}

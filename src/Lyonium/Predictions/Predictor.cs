@@ -1,0 +1,133 @@
+using System;
+using System.Collections.Generic;
+using Lyonium.Activity;
+using Lyonium.Equilibria;
+using Lyonium.Faults;
+using Lyonium.Recipes;
+using Lyonium.Solvers;
+using Lyonium.Substances;
+
+namespace Lyonium.Predictions;
+
+/// <summary>The front door: predicts the pH of a recipe with a table, a method and a model of activity coefficients.</summary>
+/// <remarks>Immutable and thread-safe; make one and share it.</remarks>
+public sealed class Predictor
+{
+    /// <summary>Makes a predictor with the defaults: the built-in table, the exact method, the Davies equation.</summary>
+    public Predictor()
+        : this(SubstanceTable.Default)
+    {
+    }
+
+    /// <summary>Makes a predictor.</summary>
+    /// <param name="table">The table of substances.</param>
+    /// <param name="method">The method; <see langword="null"/> for the exact one.</param>
+    /// <param name="activityModel">The model of activity coefficients; <see langword="null"/> for the Davies equation.</param>
+    /// <exception cref="ArgumentNullException"><paramref name="table"/> is <see langword="null"/>.</exception>
+    public Predictor(SubstanceTable table, ISolver? method = null, IActivityModel? activityModel = null)
+    {
+        Table = table ?? throw new ArgumentNullException(nameof(table));
+        Method = method ?? new ExactSolver();
+        ActivityModel = activityModel ?? new DaviesModel();
+    }
+
+    /// <summary>The table of substances.</summary>
+    public SubstanceTable Table { get; }
+
+    /// <summary>The method.</summary>
+    public ISolver Method { get; }
+
+    /// <summary>The model of activity coefficients.</summary>
+    public IActivityModel ActivityModel { get; }
+
+    /// <summary>The same predictor with another method.</summary>
+    /// <param name="method">The method.</param>
+    /// <returns>A new predictor.</returns>
+    public Predictor With(ISolver method) => new(Table, method ?? throw new ArgumentNullException(nameof(method)), ActivityModel);
+
+    /// <summary>The same predictor with another model of activity coefficients.</summary>
+    /// <param name="activityModel">The model.</param>
+    /// <returns>A new predictor.</returns>
+    public Predictor With(IActivityModel activityModel) =>
+        new(Table, Method, activityModel ?? throw new ArgumentNullException(nameof(activityModel)));
+
+    /// <summary>Predicts the pH of a recipe.</summary>
+    /// <param name="recipe">The recipe.</param>
+    /// <returns>The prediction.</returns>
+    /// <exception cref="ArgumentNullException"><paramref name="recipe"/> is <see langword="null"/>.</exception>
+    /// <exception cref="LyoniumException">The recipe is refused, or the method does not apply; every fault is listed.</exception>
+    public Prediction Predict(Recipe recipe) => TryPredict(recipe).GetValueOrThrow();
+
+    /// <summary>Predicts the pH of a mixture that was prepared already.</summary>
+    /// <param name="mixture">The mixture.</param>
+    /// <returns>The prediction.</returns>
+    /// <exception cref="ArgumentNullException"><paramref name="mixture"/> is <see langword="null"/>.</exception>
+    /// <exception cref="LyoniumException">The mixture is refused, or the method does not apply; every fault is listed.</exception>
+    public Prediction Predict(Mixture mixture) => TryPredict(mixture).GetValueOrThrow();
+
+    /// <summary>Predicts the pH of a recipe, or tells every fault as a value; never throws on numbers.</summary>
+    /// <param name="recipe">The recipe.</param>
+    /// <returns>The prediction, or every fault.</returns>
+    /// <exception cref="ArgumentNullException"><paramref name="recipe"/> is <see langword="null"/>.</exception>
+    public Attempt<Prediction> TryPredict(Recipe recipe)
+    {
+        var mixture = Mixture.TryPrepare(recipe ?? throw new ArgumentNullException(nameof(recipe)), Table);
+        return mixture.Success ? TryPredict(mixture.Value) : new Attempt<Prediction>(mixture.Faults);
+    }
+
+    /// <summary>Predicts the pH of a mixture that was prepared already, or tells every fault as a value; never throws on numbers.</summary>
+    /// <param name="mixture">The mixture.</param>
+    /// <returns>The prediction, or every fault.</returns>
+    /// <exception cref="ArgumentNullException"><paramref name="mixture"/> is <see langword="null"/>.</exception>
+    public Attempt<Prediction> TryPredict(Mixture mixture)
+    {
+        var solved = TrySolve(mixture ?? throw new ArgumentNullException(nameof(mixture)));
+        if (!solved.Success)
+        {
+            return new Attempt<Prediction>(solved.Faults);
+        }
+
+        var answer = solved.Value;
+        var assumptions = new AssumptionList(answer, this, WaterErrorInPH(mixture, answer)).ToList();
+        return new Attempt<Prediction>(Describe(answer, assumptions));
+    }
+
+    private Attempt<SolvedMixture> TrySolve(Mixture mixture) => SolvedMixture.TrySolve(mixture, Method, ActivityModel);
+
+    // What an error in estimated solute volumes does to the answer is found by answering again.
+    private double WaterErrorInPH(Mixture mixture, SolvedMixture answer)
+    {
+        if (mixture.EstimatedWaterKg <= 0)
+        {
+            return 0;
+        }
+
+        var shifted = TrySolve(mixture.WithWaterKg(mixture.WaterKg + mixture.EstimatedWaterKg));
+        return shifted.Success ? Math.Abs(shifted.Value.Outcome.PH - answer.Outcome.PH) : double.NaN;
+    }
+
+    private Prediction Describe(SolvedMixture answer, IReadOnlyList<Assumption> assumptions)
+    {
+        var mixture = answer.Modelled.Mixture;
+        var species = answer.Species();
+        return new Prediction(mixture, Method.Name, ActivityModel.Name, answer.Outcome.PH, answer.Speciation)
+        {
+            PHydrogenConcentration = -Math.Log10(species[Equilibrium.HydrogenIon].ConcentrationMolPerL),
+            Species = species,
+            Assumptions = assumptions,
+            Iterates = answer.Outcome.Iterates,
+            Cautions = CautionTable.Default.For(mixture),
+            Evidence = new Evidence
+            {
+                Software = SoftwareIdentity.Running,
+                Table = Table.Identity,
+                Constants = answer.Modelled.Constants,
+                BracketLow = answer.Outcome.BracketLow,
+                BracketHigh = answer.Outcome.BracketHigh,
+                Evaluations = answer.Outcome.Evaluations,
+                Residual = answer.Speciation.ChargeMolPerKg / answer.Speciation.ChargeMagnitudeMolPerKg,
+                InputResolution = answer.Outcome.InputResolution,
+            },
+        };
+    }
+}

@@ -1,0 +1,96 @@
+using System;
+using System.Collections.Generic;
+using Lyonium.Equilibria;
+using Lyonium.Faults;
+using Lyonium.Modelling;
+using Lyonium.Recipes;
+
+namespace Lyonium.Predictions;
+
+/// <summary>A modelled mixture with what the method found for it.</summary>
+internal sealed class SolvedMixture
+{
+    private SolvedMixture(ModelledMixture modelled, SolverOutcome outcome, Speciation speciation)
+    {
+        Modelled = modelled;
+        Outcome = outcome;
+        Speciation = speciation;
+    }
+
+    public ModelledMixture Modelled { get; }
+
+    public SolverOutcome Outcome { get; }
+
+    public Speciation Speciation { get; }
+
+    /// <summary>Models a mixture and runs the method, and turns whatever it and the activity model do into an answer or a fault.</summary>
+    public static Attempt<SolvedMixture> TrySolve(Mixture mixture, ISolver method, IActivityModel model)
+    {
+        try
+        {
+            var attempt = ModelledMixture.TryModel(mixture, model);
+            if (!attempt.Success)
+            {
+                return new Attempt<SolvedMixture>(attempt.Faults);
+            }
+
+            var modelled = attempt.Value;
+            var outcome = method.Solve(modelled.Equilibrium, model);
+            if (outcome.Status != SolverStatus.Solved)
+            {
+                return Refuse(KindOf(outcome.Status), outcome.Reason ?? "no reason was given", method, model);
+            }
+
+            if (double.IsNaN(outcome.PH) || double.IsInfinity(outcome.PH))
+            {
+                return Refuse(FaultKinds.MethodFailed, "the answer is not a number", method, model);
+            }
+
+            if (outcome.PH < outcome.BracketLow || outcome.PH > outcome.BracketHigh)
+            {
+                return Refuse(FaultKinds.MethodFailed, "the answer lies outside its own bracket", method, model);
+            }
+
+            return new Attempt<SolvedMixture>(new SolvedMixture(modelled, outcome, Speciation.At(modelled.Equilibrium, model, outcome.PH)));
+        }
+        catch (Exception e) when (e is not OutOfMemoryException)
+        {
+            // A plug-in is other people's code: whatever it throws is its fault, told by its name.
+            return Refuse(FaultKinds.MethodFailed, e.GetType().Name + ": " + e.Message, method, model);
+        }
+    }
+
+    /// <summary>Every species of the answer.</summary>
+    public IReadOnlyList<PredictedSpecies> Species()
+    {
+        var mixture = Modelled.Mixture;
+        var species = new PredictedSpecies[Modelled.Species.Count];
+        for (var i = 0; i < species.Length; i++)
+        {
+            var one = Modelled.Species[i];
+            var molality = Speciation.MolalitiesMolPerKg[i];
+            species[i] = new PredictedSpecies(
+                one.Id,
+                one.Family,
+                one.Display,
+                one.Charge,
+                molality,
+                molality * mixture.WaterKg / mixture.VolumeL,
+                one.FamilyTotalMolPerKg is double total ? (total > 0 ? molality / total : 0) : null,
+                Math.Pow(10, Speciation.Log10Gammas[i]));
+        }
+
+        return species;
+    }
+
+    private static FaultKind KindOf(SolverStatus status) => status switch
+    {
+        SolverStatus.CoupledSpecies => FaultKinds.CoupledSpecies,
+        SolverStatus.FixedActivity => FaultKinds.FixedActivity,
+        SolverStatus.DoesNotApply => FaultKinds.MethodDoesNotApply,
+        _ => FaultKinds.DidNotSettle,
+    };
+
+    private static Attempt<SolvedMixture> Refuse(FaultKind kind, string found, ISolver method, IActivityModel model) =>
+        new([Fault.Of(kind, "$", found, ("method", method.Name), ("model", model.Name))]);
+}

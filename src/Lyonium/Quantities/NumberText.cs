@@ -1,0 +1,63 @@
+using System.Globalization;
+
+namespace Lyonium.Quantities;
+
+/// <summary>Numbers as text that no culture changes.</summary>
+internal static class NumberText
+{
+    /// <summary>The shortest text that reads back to the same double.</summary>
+    public static string Shortest(double value) => value.ToString("R", CultureInfo.InvariantCulture);
+
+    /// <summary>Whether the text is a number as JSON writes it (a leading plus and a bare leading point are let pass).</summary>
+    public static bool IsNumber(string text)
+    {
+        var at = 0;
+        if (at < text.Length && text[at] is '+' or '-')
+        {
+            at++;
+        }
+
+        var digits = Digits(text, ref at);
+        if (at < text.Length && text[at] == '.')
+        {
+            at++;
+            digits += Digits(text, ref at);
+        }
+
+        if (digits == 0)
+        {
+            return false;
+        }
+
+        if (at < text.Length && text[at] is 'e' or 'E')
+        {
+            at++;
+            if (at < text.Length && text[at] is '+' or '-')
+            {
+                at++;
+            }
+
+            if (Digits(text, ref at) == 0)
+            {
+                return false;
+            }
+        }
+
+        return at == text.Length;
+    }
+
+    /// <summary>The number; infinite where it is beyond what a double holds.</summary>
+    public static double Parse(string number) =>
+        double.TryParse(number, NumberStyles.Float, CultureInfo.InvariantCulture, out var value) ? value : double.PositiveInfinity;
+
+    private static int Digits(string text, ref int at)
+    {
+        var start = at;
+        while (at < text.Length && text[at] is >= '0' and <= '9')
+        {
+            at++;
+        }
+
+        return at - start;
+    }
+}

@@ -1,0 +1,195 @@
+using System;
+using System.Collections.Generic;
+using System.Globalization;
+using System.Linq;
+using Lyonium.Faults;
+using Lyonium.Quantities;
+using Lyonium.Substances;
+
+namespace Lyonium.Recipes;
+
+/// <summary>A recipe while it is written, in code or from JSON: the one place where its rules are checked.</summary>
+internal sealed class RecipeDraft
+{
+    private const double ZeroCelsiusK = 273.15;
+    private const double HundredCelsiusK = 373.15;
+
+    private readonly List<Part> _parts = [];
+    private readonly List<Stock> _stocks = [];
+    private Measure? _temperature;
+    private Measure? _preparedAt;
+    private Measure? _makeUpTo;
+
+    public RecipeDraft(FaultList? faults = null) => Faults = faults ?? new FaultList();
+
+    public FaultList Faults { get; }
+
+    public string? Id { get; set; }
+
+    public string? Name { get; set; }
+
+    public string? Notes { get; set; }
+
+    /// <summary>Where the next part will stand.</summary>
+    public string NextPath => PathOf(_positions);
+
+    // Parts that were refused keep their place, so that paths stay those of the input.
+    private int _positions;
+    private readonly List<int> _positionOf = [];
+
+    public static string PathOf(int position) => "$.parts[" + position.ToString(CultureInfo.InvariantCulture) + "]";
+
+    public void SetTemperature(Measure? temperature) => _temperature = Between0And100(temperature, "$.temperature");
+
+    public void SetPreparedAt(Measure? temperature) => _preparedAt = Between0And100(temperature, "$.preparedAt");
+
+    public void SetMakeUpTo(Measure? mark)
+    {
+        if (mark is null || MeasureReader.Check(mark, "$.makeUpTo", mark.ToString(), Faults) is null)
+        {
+            return;
+        }
+
+        if (mark.Computed == 0)
+        {
+            Faults.Add(FaultKinds.Zero, "$.makeUpTo", mark.ToString(), MeasureReader.Expected(mark.Dimension));
+        }
+        else if (_makeUpTo is not null)
+        {
+            Faults.Add(FaultKinds.Contradictory, "$.makeUpTo", $"the marks {_makeUpTo} and {mark}");
+        }
+
+        _makeUpTo = mark;
+    }
+
+    public void AddStock(Stock stock)
+    {
+        if (stock.Name is null)
+        {
+            return;
+        }
+
+        var same = _stocks.Find(one => string.Equals(one.Name, stock.Name, StringComparison.Ordinal));
+        if (same is null)
+        {
+            _stocks.Add(stock);
+        }
+        else if (!same.Equals(stock))
+        {
+            Faults.Add(FaultKinds.DuplicateName, "$.stocks", stock.Name);
+        }
+    }
+
+    public void AddSolution(Stock? stock, Measure? taken, string? id)
+    {
+        if (stock is not null && Checked(taken) is { } sound)
+        {
+            AddPart(new SolutionPart(stock, sound, id));
+        }
+
+        _positions++;
+    }
+
+    public void AddSubstance(string? substance, Measure? taken, Measure? purity, string? id)
+    {
+        CheckPurity(purity);
+        if (substance is not null && Checked(taken) is { } sound)
+        {
+            AddPart(new SubstancePart(substance, sound, purity, id));
+        }
+
+        _positions++;
+    }
+
+    public void AddWater(Measure? taken, string? id)
+    {
+        if (Checked(taken) is { } sound)
+        {
+            AddPart(new WaterPart(sound, id));
+        }
+
+        _positions++;
+    }
+
+    /// <summary>Counts a part that was refused before it could be added.</summary>
+    public void SkipPart() => _positions++;
+
+    public Attempt<Recipe> Build(SubstanceTable table)
+    {
+        if (_positions == 0)
+        {
+            Faults.Add(FaultKinds.EmptyRecipe, "$.parts", "");
+        }
+        else if (_positions > Recipe.MostParts)
+        {
+            Faults.Add(
+                FaultKinds.TooManyParts,
+                "$.parts",
+                _positions.ToString(CultureInfo.InvariantCulture),
+                ("limit", Recipe.MostParts.ToString(CultureInfo.InvariantCulture)));
+            return Faults.Attempt<Recipe>(null);
+        }
+
+        CheckIds();
+        var resolver = new SubstanceResolver(table, Faults);
+        var stocks = _stocks.Select(stock => resolver.Resolve(stock, "$.stocks." + stock.Name)).ToArray();
+        var parts = _parts.Select((part, index) => resolver.Resolve(part, PathOf(_positionOf[index]))).ToArray();
+        if (Faults.Any)
+        {
+            return Faults.Attempt<Recipe>(null);
+        }
+
+        var recipe = new Recipe(Id, Name, _temperature, _preparedAt, Array.AsReadOnly(stocks), Array.AsReadOnly(parts), _makeUpTo, Notes);
+        Faults.AddRange(Mixture.TryPrepare(recipe, table).Faults);
+        return Faults.Attempt(recipe);
+    }
+
+    private void AddPart(Part part)
+    {
+        _parts.Add(part);
+        _positionOf.Add(_positions);
+    }
+
+    private Measure? Checked(Measure? taken) =>
+        taken is null ? null : MeasureReader.Check(taken, NextPath + "." + TakenProperty(taken.Dimension), taken.ToString(), Faults);
+
+    private static string TakenProperty(Dimension dimension) => dimension switch
+    {
+        Dimension.Mass => "mass",
+        Dimension.Amount => "amount",
+        _ => "volume",
+    };
+
+    private void CheckPurity(Measure? purity)
+    {
+        if (purity is not null && !(purity.Computed > 0 && purity.Computed <= 1.1))
+        {
+            Faults.Add(FaultKinds.OutOfRange, NextPath + ".purity", purity.ToString(), ("expected", "purity"), ("low", "above 0 %"), ("high", "110 %"));
+        }
+    }
+
+    private Measure? Between0And100(Measure? temperature, string path)
+    {
+        if (temperature is null || double.IsNaN(temperature.Computed)
+            || (temperature.Computed >= ZeroCelsiusK && temperature.Computed <= HundredCelsiusK))
+        {
+            return temperature is null ? null : MeasureReader.Check(temperature, path, temperature.ToString(), Faults);
+        }
+
+        Faults.Add(
+            FaultKinds.OutOfRange, path, temperature.ToString(), MeasureReader.Expected(Dimension.Temperature), ("low", "0 Cel"), ("high", "100 Cel"));
+        return null;
+    }
+
+    private void CheckIds()
+    {
+        var taken = new HashSet<string>(StringComparer.Ordinal);
+        for (var i = 0; i < _parts.Count; i++)
+        {
+            if (_parts[i].Id is { } id && !taken.Add(id))
+            {
+                Faults.Add(FaultKinds.DuplicateName, PathOf(_positionOf[i]) + ".id", id);
+            }
+        }
+    }
+}

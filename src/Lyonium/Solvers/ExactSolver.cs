@@ -1,0 +1,239 @@
+using System;
+using System.Buffers;
+using Lyonium.Equilibria;
+
+namespace Lyonium.Solvers;
+
+/// <summary>The exact method: the zero of the full charge balance, certified by a bracket.</summary>
+/// <remarks>
+/// <para>
+/// At a given hydrogen-ion activity every ladder speciates in closed form and the charges are summed, activity coefficients and ionic
+/// strength included; the sum falls with pH and the method finds its zero. Each step replaces every dissociation term by that one of its
+/// two asymptotes (a constant plus a term in a, or a constant plus a term in 1/a) which matches its value and slope, and solves the
+/// quadratic equation that is left; where that step leaves the bracket, the bracket's geometric mean is taken.
+/// </para>
+/// <para>
+/// The bracket is returned as two pH values at which the balance was found to have opposite signs, a few last digits apart. The solve
+/// allocates nothing. Stateless and thread-safe.
+/// </para>
+/// </remarks>
+public sealed class ExactSolver : ISolver
+{
+    private const double LowestPH = -50;
+    private const double HighestPH = 70;
+    private const double WidestBracket = 1e-9;
+    private const int MostEvaluations = 400;
+
+    /// <inheritdoc/>
+    public string Name => "exact";
+
+    /// <inheritdoc/>
+    public SolverOutcome Solve(Equilibrium equilibrium, IActivityModel model)
+    {
+        _ = equilibrium ?? throw new ArgumentNullException(nameof(equilibrium));
+        _ = model ?? throw new ArgumentNullException(nameof(model));
+        if (!equilibrium.IsLadders)
+        {
+            return Refuse(equilibrium);
+        }
+
+        var buffer = ArrayPool<double>.Shared.Rent(LadderBalance.BufferLength(equilibrium));
+        try
+        {
+            var search = new Search(new LadderBalance(equilibrium, model, buffer));
+            return search.Run();
+        }
+        finally
+        {
+            ArrayPool<double>.Shared.Return(buffer);
+        }
+    }
+
+    private static SolverOutcome Refuse(Equilibrium equilibrium)
+    {
+        for (var i = 0; i < equilibrium.Species.Count; i++)
+        {
+            if (!equilibrium.Species[i].IsRung)
+            {
+                return SolverOutcome.Without(SolverStatus.CoupledSpecies, $"species {i}");
+            }
+        }
+
+        for (var i = 0; i < equilibrium.Constraints.Count; i++)
+        {
+            if (equilibrium.Constraints[i].Kind == ConstraintKind.FixedActivity)
+            {
+                return SolverOutcome.Without(SolverStatus.FixedActivity, $"component {i}");
+            }
+        }
+
+        throw new InvalidOperationException("An equilibrium without coupled species and fixed activities is one of ladders.");
+    }
+
+    private ref struct Search
+    {
+        private LadderBalance _balance;
+        private int _evaluations;
+        private bool _settled;
+
+        public Search(LadderBalance balance)
+        {
+            _balance = balance;
+            _settled = true;
+        }
+
+        public SolverOutcome Run()
+        {
+            var pH = -Math.Log10(FindZero());
+            return _settled ? Certify(pH) : NotSettled("the activity coefficients do not settle");
+        }
+
+        private double FindZero()
+        {
+            var low = Math.Pow(10, -HighestPH);
+            var high = Math.Pow(10, -LowestPH);
+            var activity = 1e-7;
+            double lastStep = double.NaN, lastMove = double.NaN;
+            while (_settled && _evaluations < MostEvaluations)
+            {
+                var charge = ChargeAt(activity);
+                if (charge > 0)
+                {
+                    high = activity;
+                }
+                else
+                {
+                    low = activity;
+                }
+
+                // The error that is left shrinks at least as fast as the steps do.
+                var step = Math.Log(Factor(charge));
+                var rate = Math.Min(1, Math.Abs(step / lastStep));
+                if (Math.Abs(step) <= 1e-15 || Math.Abs(step) * rate <= 1e-16)
+                {
+                    return activity * Math.Exp(step);
+                }
+
+                var move = Secant(step, lastStep, lastMove);
+                var next = activity * Math.Exp(move);
+                if (!(next > low && next < high))
+                {
+                    next = Math.Sqrt(low) * Math.Sqrt(high);
+                    move = Math.Log(next / activity);
+                }
+
+                lastStep = step;
+                lastMove = move;
+                activity = next;
+            }
+
+            return activity;
+        }
+
+        // Activity coefficients move with pH, so near the zero the step is a little too short or too long; two steps tell by how much.
+        private static double Secant(double step, double lastStep, double lastMove)
+        {
+            var factor = lastMove / (lastStep - step);
+            return Math.Abs(step) < 0.1 && factor is > 0.5 and < 2 ? step * factor : step;
+        }
+
+        // The factor t on the activity that makes Rising · t + constant − Falling / t zero.
+        private readonly double Factor(double charge)
+        {
+            var constant = charge - _balance.Rising + _balance.Falling;
+            var root = Math.Sqrt((constant * constant) + (4 * _balance.Rising * _balance.Falling));
+            return constant > 0 ? 2 * _balance.Falling / (constant + root) : (root - constant) / (2 * _balance.Rising);
+        }
+
+        private double ChargeAt(double activity)
+        {
+            _evaluations++;
+            _settled &= _balance.At(activity);
+            return _balance.Charge;
+        }
+
+        private double ChargeAtPH(double pH) => ChargeAt(Math.Pow(10, -pH));
+
+        private SolverOutcome Certify(double pH)
+        {
+            var digit = Math.Max(1, Math.Abs(pH)) * 2.220446049250313e-16;
+            double low = pH - digit, high = pH + digit, reach = digit;
+            var lowCharge = ChargeAtPH(low);
+            while (_settled && lowCharge <= 0 && reach < 1)
+            {
+                high = low;
+                reach *= 4;
+                low -= reach;
+                lowCharge = ChargeAtPH(low);
+            }
+
+            var highCharge = ChargeAtPH(high);
+            while (_settled && highCharge >= 0 && reach < 1)
+            {
+                low = high;
+                lowCharge = highCharge;
+                reach *= 4;
+                high += reach;
+                highCharge = ChargeAtPH(high);
+            }
+
+            if (!_settled)
+            {
+                return NotSettled("the activity coefficients do not settle");
+            }
+
+            if (!(lowCharge > 0 && highCharge < 0))
+            {
+                return NotSettled("the charge balance has no zero that a bracket can hold");
+            }
+
+            while (high - low > 4 * digit && _evaluations < MostEvaluations)
+            {
+                var middle = low + (0.5 * (high - low));
+                var charge = ChargeAtPH(middle);
+                if (charge > 0)
+                {
+                    low = middle;
+                    lowCharge = charge;
+                }
+                else if (charge < 0)
+                {
+                    high = middle;
+                    highCharge = charge;
+                }
+                else
+                {
+                    break;
+                }
+            }
+
+            return Answer(low, high, lowCharge - highCharge);
+        }
+
+        private SolverOutcome Answer(double low, double high, double jump)
+        {
+            var pH = low + (0.5 * (high - low));
+            _ = ChargeAtPH(pH);
+            var slope = Math.Log(10) * (_balance.Rising + _balance.Falling);
+            var resolution = 1.1102230246251565e-16 * _balance.FixedMagnitude / slope;
+
+            // Beyond its range an activity model can make the balance jump; a jump is not a zero.
+            if (!_settled || high - low > WidestBracket || jump > (1e-6 * slope) + (1e3 * slope * (high - low)))
+            {
+                return NotSettled("the charge balance jumps over zero, so that no pH fulfils it");
+            }
+
+            return new SolverOutcome
+            {
+                Status = SolverStatus.Solved,
+                PH = pH,
+                BracketLow = low,
+                BracketHigh = high,
+                Evaluations = _evaluations,
+                InputResolution = resolution,
+            };
+        }
+
+        private readonly SolverOutcome NotSettled(string reason) => SolverOutcome.Without(SolverStatus.NotSettled, reason, _evaluations);
+    }
+}

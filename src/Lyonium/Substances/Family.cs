@@ -1,0 +1,29 @@
+using System.Collections.Generic;
+
+namespace Lyonium.Substances;
+
+/// <summary>A protolyte in all its forms, one proton apart; or a spectator, with one form and no steps.</summary>
+/// <remarks>Immutable; safe to share between threads.</remarks>
+public sealed record Family
+{
+    /// <summary>The id, for ever.</summary>
+    public required string Id { get; init; }
+
+    /// <summary>The name.</summary>
+    public required string Name { get; init; }
+
+    /// <summary>The forms, the most protonated first.</summary>
+    public required IReadOnlyList<ChemicalFormula> Forms { get; init; }
+
+    /// <summary>The steps between the forms, the most acidic first; one fewer than forms.</summary>
+    public required IReadOnlyList<DissociationStep> Steps { get; init; }
+
+    /// <summary>What else a reader should know; empty where there is nothing.</summary>
+    public string Note { get; init; } = "";
+
+    /// <summary>The form that has given up every proton the table knows of.</summary>
+    public ChemicalFormula Base => Forms[Forms.Count - 1];
+
+    /// <summary>Whether it takes no part in proton exchange.</summary>
+    public bool IsSpectator => Steps.Count == 0;
+}

@@ -1,0 +1,164 @@
+using System;
+using System.Collections.Generic;
+using System.Globalization;
+using System.Linq;
+using Lyonium.Documents;
+using Lyonium.Faults;
+using Lyonium.Provenance;
+using Lyonium.Quantities;
+
+namespace Lyonium.Substances;
+
+/// <summary>Reads the families of a table and holds their ladders to one proton a form and rising pKa.</summary>
+internal sealed class FamilyReader(SourcedValueReader values)
+{
+    public IReadOnlyList<Family> Read(JsonPlace? list)
+    {
+        var families = new List<Family>();
+        var ids = new HashSet<string>(StringComparer.Ordinal);
+        foreach (var place in list?.Items() ?? [])
+        {
+            if (ReadFamily(place) is not { } family)
+            {
+                continue;
+            }
+
+            if (ids.Add(family.Id))
+            {
+                families.Add(family);
+            }
+            else
+            {
+                place.Faults.Add(FaultKinds.TableDuplicate, place.Path + ".id", family.Id, ("owner", "another family"));
+            }
+        }
+
+        return families;
+    }
+
+    private Family? ReadFamily(JsonPlace place)
+    {
+        var properties = place.Properties("id", "name", "forms", "steps", "note");
+        var id = TableId.Read(place, properties);
+        var name = place.Need(properties, "name")?.Text();
+        var formPlaces = place.Need(properties, "forms")?.Items() ?? [];
+        var forms = formPlaces.Select(ReadForm).ToArray();
+        var stepPlaces = place.Need(properties, "steps")?.Items() ?? [];
+        if (id is null || name is null || forms.Length == 0 || forms.Contains(null))
+        {
+            return null;
+        }
+
+        var whole = forms.Select(form => form!).ToArray();
+        CheckLadder(id, whole, formPlaces, stepPlaces.Count, place);
+        var steps = stepPlaces.Select((step, index) => ReadStep(step, id, index + 1)).ToArray();
+        if (steps.Contains(null))
+        {
+            return null;
+        }
+
+        CheckOrder(id, steps, stepPlaces);
+        return new Family
+        {
+            Id = id,
+            Name = name,
+            Forms = whole,
+            Steps = steps.Select(step => step!).ToArray(),
+            Note = properties.TryGetValue("note", out var note) ? note.Text() ?? "" : "",
+        };
+    }
+
+    private static ChemicalFormula? ReadForm(JsonPlace place)
+    {
+        var properties = place.Properties("formula");
+        if (place.Need(properties, "formula") is not { } formulaPlace || formulaPlace.Text() is not { } text)
+        {
+            return null;
+        }
+
+        if (!ChemicalFormula.TryParse(text, out var formula, out var detail))
+        {
+            place.Faults.Add(FaultKinds.TableBadFormula, formulaPlace.Path, text, ("detail", detail));
+        }
+
+        return formula;
+    }
+
+    private DissociationStep? ReadStep(JsonPlace place, string family, int number)
+    {
+        var properties = place.Properties("pKa", "enthalpy", "heatCapacity", "alternatives", "reason");
+        var pKa = values.Read(place.Need(properties, "pKa"));
+        var alternatives = (properties.TryGetValue("alternatives", out var others) ? others.Items() : []).Select(values.Read).OfType<SourcedValue>().ToArray();
+        var reason = properties.TryGetValue("reason", out var why) ? why.Text() ?? "" : "";
+        if (alternatives.Length > 0 && reason.Length == 0)
+        {
+            place.Faults.Add(FaultKinds.MissingProperty, place.Path, "", ("property", "reason"));
+        }
+
+        if (pKa is null)
+        {
+            return null;
+        }
+
+        if (Math.Abs(pKa.Value) > 50)
+        {
+            place.Faults.Add(
+                FaultKinds.TableBadValue, place.Path + ".pKa", NumberText.Shortest(pKa.Value), ("detail", "a pKa lies between -50 and 50"));
+        }
+
+        return new DissociationStep
+        {
+            Id = family + ":" + number.ToString(CultureInfo.InvariantCulture),
+            Number = number,
+            PKa = pKa,
+            EnthalpyKJPerMol = properties.TryGetValue("enthalpy", out var enthalpy) ? values.Read(enthalpy) : null,
+            HeatCapacityJPerMolK = properties.TryGetValue("heatCapacity", out var capacity) ? values.Read(capacity) : null,
+            Alternatives = alternatives,
+            Reason = reason,
+        };
+    }
+
+    private static void CheckLadder(string id, ChemicalFormula[] forms, IReadOnlyList<JsonPlace> places, int steps, JsonPlace family)
+    {
+        for (var i = 1; i < forms.Length; i++)
+        {
+            if (!IsOneProtonLess(forms[i - 1], forms[i]))
+            {
+                family.Faults.Add(FaultKinds.TableBadLadder, places[i].Path, forms[i].Text, ("family", id));
+            }
+        }
+
+        if (steps != forms.Length - 1)
+        {
+            var count = steps.ToString(CultureInfo.InvariantCulture) + " steps";
+            family.Faults.Add(FaultKinds.TableBadLadder, family.Path + ".steps", count, ("family", id));
+        }
+    }
+
+    private static bool IsOneProtonLess(ChemicalFormula above, ChemicalFormula below)
+    {
+        static double Of(ChemicalFormula formula, string symbol) => formula.Composition.TryGetValue(symbol, out var count) ? count : 0;
+        return above.Charge == below.Charge + 1
+            && Of(above, "H") == Of(below, "H") + 1
+            && above.Composition.Keys.Concat(below.Composition.Keys).All(symbol => symbol == "H" || Of(above, symbol) == Of(below, symbol));
+    }
+
+    private static void CheckOrder(string id, DissociationStep?[] steps, IReadOnlyList<JsonPlace> places)
+    {
+        for (var i = 1; i < steps.Length; i++)
+        {
+            var before = steps[i - 1]!.PKa.Value;
+            var value = steps[i]!.PKa.Value;
+            if (!(value > before))
+            {
+                places[i].Faults.Add(
+                    FaultKinds.TableStepOutOfOrder,
+                    places[i].Path + ".pKa",
+                    NumberText.Shortest(value),
+                    ("step", (i + 1).ToString(CultureInfo.InvariantCulture)),
+                    ("family", id),
+                    ("before", NumberText.Shortest(before)));
+            }
+        }
+    }
+}

@@ -1,0 +1,49 @@
+using System;
+using System.Collections.Generic;
+using System.Linq;
+
+namespace Lyonium.Substances;
+
+/// <summary>The names nearest to one that was not found, by the number of letters to change (Levenshtein distance).</summary>
+internal static class NearestNames
+{
+    public static IReadOnlyList<string> To(string wanted, IEnumerable<string> names)
+    {
+        // A name longer than any substance's is no typing error, and must not cost time.
+        if (wanted.Length > 80)
+        {
+            return [];
+        }
+
+        var folded = NameFolding.Fold(wanted);
+        var farthest = Math.Max(2, folded.Length / 3);
+        return names
+            .Select(name => (Name: name, Distance: Distance(folded, NameFolding.Fold(name))))
+            .Where(one => one.Distance <= farthest)
+            .OrderBy(one => one.Distance)
+            .ThenBy(one => one.Name, StringComparer.Ordinal)
+            .Select(one => one.Name)
+            .Distinct(StringComparer.Ordinal)
+            .Take(3)
+            .ToArray();
+    }
+
+    private static int Distance(string a, string b)
+    {
+        var above = Enumerable.Range(0, b.Length + 1).ToArray();
+        var row = new int[b.Length + 1];
+        for (var i = 1; i <= a.Length; i++)
+        {
+            row[0] = i;
+            for (var j = 1; j <= b.Length; j++)
+            {
+                var change = above[j - 1] + (a[i - 1] == b[j - 1] ? 0 : 1);
+                row[j] = Math.Min(change, 1 + Math.Min(above[j], row[j - 1]));
+            }
+
+            (above, row) = (row, above);
+        }
+
+        return above[b.Length];
+    }
+}
