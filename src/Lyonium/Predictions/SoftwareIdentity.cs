@@ -7,8 +7,8 @@ namespace Lyonium.Predictions;
 /// <summary>Which build of the library computed a number, and on what kind of processor.</summary>
 /// <param name="Version">The version of the library.</param>
 /// <param name="Target">The target framework that it was built for.</param>
-/// <param name="ProcessorArchitecture">The architecture of the process, such as <c>X64</c>.</param>
-public sealed record SoftwareIdentity(string Version, string Target, string ProcessorArchitecture)
+/// <param name="ProcessArchitecture">The architecture of the process, such as <c>X64</c>.</param>
+public sealed record SoftwareIdentity(string Version, string Target, string ProcessArchitecture)
 {
     /// <summary>The build that is running.</summary>
     public static SoftwareIdentity Running { get; } = new(ReadVersion(), TargetFramework, RuntimeInformation.ProcessArchitecture.ToString());

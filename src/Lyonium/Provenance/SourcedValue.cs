@@ -44,4 +44,10 @@ public sealed record SourcedValue
 
     /// <summary>What else a reader should know; empty where there is nothing.</summary>
     public string Note { get; init; } = "";
+
+    /// <summary><see cref="Known"/> as tables and records write it: <c>read</c>, <c>memory</c>, <c>read+memory</c> or <c>derived</c>.</summary>
+    public string KnownAs => KnownText.Of(Known);
+
+    /// <summary>The conditions in words, such as <c>25 Cel, 0.1 mol/kg</c>; <see langword="null"/> where it has none.</summary>
+    public string? Conditions => ConditionsText.Of(this);
 }

@@ -6,7 +6,24 @@ namespace Lyonium.Quantities;
 internal static class NumberText
 {
     /// <summary>The shortest text that reads back to the same double.</summary>
-    public static string Shortest(double value) => value.ToString("R", CultureInfo.InvariantCulture);
+    public static string Shortest(double value)
+    {
+#if NETSTANDARD2_0
+        // On .NET Framework "R" is neither always the shortest nor always right.
+        for (var digits = 15; digits < 17; digits++)
+        {
+            var text = value.ToString("G" + digits.ToString(CultureInfo.InvariantCulture), CultureInfo.InvariantCulture);
+            if (Parse(text) == value)
+            {
+                return text;
+            }
+        }
+
+        return value.ToString("G17", CultureInfo.InvariantCulture);
+#else
+        return value.ToString("R", CultureInfo.InvariantCulture);
+#endif
+    }
 
     /// <summary>Whether the text is a number as JSON writes it (a leading plus and a bare leading point are let pass).</summary>
     public static bool IsNumber(string text)

@@ -15,6 +15,11 @@ internal sealed class RecipeDraft
     private const double HundredCelsiusK = 373.15;
 
     private readonly List<Part> _parts = [];
+
+    // Parts that were refused keep their place, so that paths stay those of the input.
+    private readonly List<int> _positionOf = [];
+    private int _positions;
+
     private readonly List<Stock> _stocks = [];
     private Measure? _temperature;
     private Measure? _preparedAt;
@@ -32,10 +37,6 @@ internal sealed class RecipeDraft
 
     /// <summary>Where the next part will stand.</summary>
     public string NextPath => PathOf(_positions);
-
-    // Parts that were refused keep their place, so that paths stay those of the input.
-    private int _positions;
-    private readonly List<int> _positionOf = [];
 
     public static string PathOf(int position) => "$.parts[" + position.ToString(CultureInfo.InvariantCulture) + "]";
 
@@ -92,6 +93,12 @@ internal sealed class RecipeDraft
 
     public void AddSubstance(string? substance, Measure? taken, Measure? purity, string? id)
     {
+        if (substance is not null && WaterName.Is(substance) && taken is { Dimension: Dimension.Mass } && purity is null)
+        {
+            AddWater(taken, id);
+            return;
+        }
+
         CheckPurity(purity);
         if (substance is not null && Checked(taken) is { } sound)
         {
@@ -153,7 +160,7 @@ internal sealed class RecipeDraft
     private Measure? Checked(Measure? taken) =>
         taken is null ? null : MeasureReader.Check(taken, NextPath + "." + TakenProperty(taken.Dimension), taken.ToString(), Faults);
 
-    private static string TakenProperty(Dimension dimension) => dimension switch
+    internal static string TakenProperty(Dimension dimension) => dimension switch
     {
         Dimension.Mass => "mass",
         Dimension.Amount => "amount",

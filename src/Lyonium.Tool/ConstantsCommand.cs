@@ -1,0 +1,48 @@
+using System;
+using System.CommandLine;
+using System.Linq;
+using Lyonium.Substances;
+
+namespace Lyonium.Tool;
+
+/// <summary><c>lyonium constants</c>: looks up the table with its sources.</summary>
+internal static class ConstantsCommand
+{
+    public static Command Create()
+    {
+        var name = new Argument<string?>("NAME")
+        {
+            Description = "a substance (name, id or formula) or a family; all of them where it is left out",
+            Arity = ArgumentArity.ZeroOrOne,
+        };
+        var command = new Command("constants", "Looks up substances and their constants, with the sources.") { name };
+        command.SetAction(parsed => Run(parsed.GetValue(name)));
+        return command;
+    }
+
+    private static int Run(string? name)
+    {
+        var table = SubstanceTable.Default;
+        var text = new ConstantsText(table, Terminal.Create());
+        if (name is null)
+        {
+            text.PrintAll();
+            return ExitStatus.Done;
+        }
+
+        var substance = table.Find(name);
+        if (substance.Success)
+        {
+            text.Print(substance.Value);
+            return ExitStatus.Done;
+        }
+
+        if (table.Families.FirstOrDefault(one => string.Equals(one.Id, name.Trim(), StringComparison.OrdinalIgnoreCase)) is { } family)
+        {
+            text.Print(family);
+            return ExitStatus.Done;
+        }
+
+        return OutputFormat.Print(substance.Faults, asJson: false);
+    }
+}

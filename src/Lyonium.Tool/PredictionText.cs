@@ -1,0 +1,184 @@
+using System;
+using System.Collections.Generic;
+using System.Globalization;
+using System.Linq;
+using Lyonium.Predictions;
+using Lyonium.Recipes;
+using Spectre.Console;
+
+namespace Lyonium.Tool;
+
+/// <summary>A prediction as a page that a chemist can pin to the wall.</summary>
+internal sealed class PredictionText(Prediction prediction)
+{
+    // A form that makes up less of its family than this is left to the record.
+    private const double SmallestShare = 0.0005;
+
+    public void Print(IAnsiConsole console)
+    {
+        PrintAnswer(console);
+        PrintContents(console);
+        PrintSpecies(console);
+        PrintAssumptions(console);
+        PrintEvidence(console);
+        PrintCautions(console);
+    }
+
+    private static Grid Columns(params int[] rightAligned)
+    {
+        var grid = new Grid();
+        for (var i = 0; i < 4; i++)
+        {
+            var column = new GridColumn { Padding = new Padding(i == 0 ? 2 : 1, 0, 1, 0) };
+            grid.AddColumn(rightAligned.Contains(i) ? column.RightAligned() : column);
+        }
+
+        return grid;
+    }
+
+    private static void Heading(IAnsiConsole console, string text)
+    {
+        console.WriteLine();
+        console.MarkupLineInterpolated($"[bold]{text}[/]");
+    }
+
+    private void PrintAnswer(IAnsiConsole console)
+    {
+        var recipe = prediction.Recipe;
+        var celsius = NumberFormat.Short(recipe.TemperatureK - 273.15);
+        console.MarkupLineInterpolated($"[bold]{recipe.Name ?? "Recipe"}[/]{(recipe.Id is null ? "" : "  " + recipe.Id)}");
+        console.MarkupLineInterpolated($"[bold green]pH {prediction.Reported}[/] at {celsius} °C");
+        var brief = new Grid().AddColumn(new GridColumn { Padding = new Padding(2, 0, 2, 0) }).AddColumn();
+        Row(brief, "pH", prediction.PH.ToString("F4", CultureInfo.InvariantCulture) + "  (activity, molality scale)");
+        Row(brief, "p[H]", prediction.PHydrogenConcentration.ToString("F4", CultureInfo.InvariantCulture) + "  (concentration, mol/L)");
+        Row(brief, "ionic strength", NumberFormat.Significant(prediction.IonicStrengthMolPerKg, 4) + " mol/kg");
+        Row(brief, "volume", NumberFormat.Volume(prediction.Mixture.VolumeL) + " with " + NumberFormat.Mass(prediction.Mixture.WaterKg) + " of water");
+        Row(brief, "method", prediction.Method + ", activity coefficients " + prediction.ActivityModel);
+        console.Write(brief);
+    }
+
+    private static void Row(Grid grid, params string[] cells) => grid.AddRow([.. cells.Select(cell => new Text(cell))]);
+
+    private void PrintContents(IAnsiConsole console)
+    {
+        Heading(console, "Poured and weighed");
+        var grid = Columns(0, 2);
+        foreach (var part in prediction.Mixture.Parts)
+        {
+            Row(
+                grid,
+                part.Part.Taken.ToString(),
+                Describe(part),
+                part.Substance is null ? "" : NumberFormat.Amount(part.AmountMol),
+                "");
+        }
+
+        if (prediction.Recipe.MakeUpTo is { } mark)
+        {
+            Row(grid, "to " + mark, "water to the mark", "", "");
+        }
+
+        console.Write(grid);
+    }
+
+    private static string Describe(PreparedPart part) => part.Part switch
+    {
+        SolutionPart { Stock: var stock } => part.Substance!.Name + " " + stock.Strength + (stock.Name is null ? "" : $"  ({stock.Name})"),
+        SubstancePart { Purity: { } purity } => part.Substance!.Name + ", " + purity,
+        SubstancePart => part.Substance!.Name,
+        _ => "water",
+    };
+
+    private void PrintSpecies(IAnsiConsole console)
+    {
+        Heading(console, "In solution");
+        var grid = Columns(1, 2, 3);
+        Row(grid, "", "mol/kg", "mol/L", "share");
+        foreach (var one in prediction.Species.Where(one => one.Fraction is null or >= SmallestShare))
+        {
+            Row(
+                grid,
+                one.Display,
+                NumberFormat.Significant(one.MolalityMolPerKg, 4),
+                NumberFormat.Significant(one.ConcentrationMolPerL, 4),
+                one.Fraction is double share ? NumberFormat.Percent(share) : "");
+        }
+
+        console.Write(grid);
+        var hidden = prediction.Species.Count(one => one.Fraction < SmallestShare);
+        if (hidden > 0)
+        {
+            console.MarkupLineInterpolated(CultureInfo.InvariantCulture, $"[dim]  {hidden} more below 0.05 % of their kind: see the record (--format json)[/]");
+        }
+    }
+
+    private void PrintAssumptions(IAnsiConsole console)
+    {
+        var broken = prediction.Assumptions.Where(one => !one.Held).ToArray();
+        Heading(console, "Taken for granted");
+        var grid = new Grid().AddColumn(new GridColumn { Padding = new Padding(2, 0, 2, 0) }).AddColumn().AddColumn();
+        foreach (var one in prediction.Assumptions)
+        {
+            grid.AddRow(
+                new Text(one.Held ? "held" : "NOT HELD", one.Held ? Style.Plain : new Style(Color.Red, decoration: Decoration.Bold)),
+                new Text(one.Code.Replace('-', ' ') + (one.Of == "mixture" ? "" : " (" + one.Of + ")")),
+                new Text(Figure(one)));
+        }
+
+        console.Write(grid);
+        if (broken.Length > 0)
+        {
+            console.MarkupLineInterpolated(CultureInfo.InvariantCulture, $"[red]  {broken.Length} not held: the number may be off by more than its digits say.[/]");
+        }
+    }
+
+    private static string Figure(Assumption one)
+    {
+        if (one.Figure is not double figure)
+        {
+            return one.Basis;
+        }
+
+        return one.Limit is double limit
+            ? $"{NumberFormat.Short(figure, 3)} against {NumberFormat.Short(limit, 3)}"
+            : one.Basis;
+    }
+
+    private void PrintEvidence(IAnsiConsole console)
+    {
+        var evidence = prediction.Evidence;
+        Heading(console, "Rests on");
+        var grid = new Grid().AddColumn(new GridColumn { Padding = new Padding(2, 0, 2, 0) }).AddColumn();
+        foreach (var one in evidence.Constants.Where(one => one.Quantity.StartsWith('p')))
+        {
+            var uncertainty = one.Value.StandardUncertainty is double u ? " ± " + NumberFormat.Short(u) : "";
+            Row(
+                grid,
+                one.Quantity + " " + one.Id,
+                $"{NumberFormat.Short(one.Value.Value)}{uncertainty} at {one.Value.Conditions ?? "no stated temperature"}  [{one.Value.Source.Key}, {one.Value.KnownAs}]");
+        }
+
+        if (!double.IsNaN(evidence.BracketLow))
+        {
+            var width = NumberFormat.Significant(evidence.BracketHigh - evidence.BracketLow, 1);
+            Row(grid, "certificate", $"the charge balance changes sign within {width} of this pH ({evidence.Evaluations} evaluations)");
+        }
+
+        Row(grid, "table", $"edition {evidence.Table.Edition}, SHA-256 {evidence.Table.Sha256[..16]}…");
+        Row(grid, "software", $"Lyonium {evidence.Software.Version}, {evidence.Software.Target}, {evidence.Software.ProcessArchitecture}");
+        console.Write(grid);
+    }
+
+    private void PrintCautions(IAnsiConsole console)
+    {
+        Heading(console, "Cautions");
+        var grid = new Grid().AddColumn(new GridColumn { Padding = new Padding(2, 0, 2, 0) }).AddColumn();
+        foreach (var one in prediction.Cautions)
+        {
+            IEnumerable<string> codes = one.Hazards.Concat(one.HazardsEu.Select(code => code + " (EU)"));
+            Row(grid, string.Join(' ', codes), one.Text + (one.Because.Count == 0 ? "" : " (" + string.Join(", ", one.Because) + ")"));
+        }
+
+        console.Write(grid);
+    }
+}

@@ -1,0 +1,61 @@
+using System.Collections.Generic;
+using System.Text.Json.Serialization;
+using Lyonium.Recipes;
+
+namespace Lyonium.Records;
+
+// The JSON contract as types; docs/schemas has the same as JSON Schema. Names and order are those of the text.
+
+internal sealed record NumberWithUnit(double Value, string Unit);
+
+internal sealed record ReportedEntry([property: JsonPropertyName("pH")] string PH, string Rule);
+
+internal sealed record SpeciesEntry(
+    string Id, int Charge, string Family, string Display, NumberWithUnit Molality, NumberWithUnit Concentration, double? Fraction);
+
+internal sealed record AssumptionEntry(string Code, string Of, double? Figure, double? Limit, bool Held, string Basis);
+
+internal sealed record IterateEntry([property: JsonPropertyName("pH")] double PH, double Correction);
+
+internal sealed record CautionEntry(
+    string Code, IReadOnlyList<string> Hazard, IReadOnlyList<string>? HazardEu, string Text, IReadOnlyList<string> Because);
+
+internal sealed record SoftwareEntry(string Version, string Target, string ProcessArchitecture);
+
+internal sealed record LayerEntry(string Name, string Edition, string Sha256);
+
+internal sealed record TableEntry(string Edition, string Sha256, IReadOnlyList<LayerEntry> Layers);
+
+internal sealed record ConstantEntry(string Id, string Quantity, double Value, string? At, string Source, string Known);
+
+internal sealed record EvidenceEntry(
+    SoftwareEntry Software,
+    TableEntry Table,
+    IReadOnlyList<ConstantEntry> Constants,
+    IReadOnlyList<double>? Bracket,
+    int Evaluations,
+    double Residual,
+    double? InputResolution);
+
+internal sealed record RecordDocument(
+    string Format,
+    [property: JsonConverter(typeof(RecipeConverter))] Recipe Recipe,
+    [property: JsonPropertyName("pH")] double PH,
+    [property: JsonPropertyName("pHydrogenConcentration")] double PHydrogenConcentration,
+    ReportedEntry Reported,
+    string Method,
+    string ActivityModel,
+    NumberWithUnit IonicStrength,
+    NumberWithUnit Volume,
+    NumberWithUnit Water,
+    NumberWithUnit Temperature,
+    IReadOnlyList<SpeciesEntry> Species,
+    IReadOnlyList<AssumptionEntry> Assumptions,
+    IReadOnlyList<IterateEntry> Iterates,
+    IReadOnlyList<CautionEntry> Cautions,
+    EvidenceEntry Evidence,
+    [property: JsonConverter(typeof(RawJsonConverter))] string? Notes);
+
+internal sealed record FaultEntry(string Code, string Path, string Found, string Message, string Remedy);
+
+internal sealed record FaultsDocument(string Format, IReadOnlyList<FaultEntry> Faults);

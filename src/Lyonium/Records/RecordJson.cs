@@ -1,0 +1,83 @@
+using System;
+using System.Collections.Generic;
+using System.Linq;
+using System.Text.Json;
+using Lyonium.Modelling;
+using Lyonium.Predictions;
+using Lyonium.Quantities;
+
+namespace Lyonium.Records;
+
+/// <summary>Predictions as JSON (<c>lyonium-record/1</c>): the recipe, the answer and its evidence.</summary>
+/// <remarks>Thread-safe.</remarks>
+public static class RecordJson
+{
+    /// <summary>Writes the record of a prediction.</summary>
+    /// <param name="prediction">The prediction.</param>
+    /// <returns>The text, indented.</returns>
+    /// <exception cref="ArgumentNullException"><paramref name="prediction"/> is <see langword="null"/>.</exception>
+    public static string Write(Prediction prediction)
+    {
+        _ = prediction ?? throw new ArgumentNullException(nameof(prediction));
+        return JsonSerializer.Serialize(Describe(prediction), ContractJson.Context.RecordDocument);
+    }
+
+    private static RecordDocument Describe(Prediction prediction) => new(
+        "lyonium-record/1",
+        prediction.Recipe,
+        prediction.PH,
+        prediction.PHydrogenConcentration,
+        new ReportedEntry(prediction.Reported, "two decimals"),
+        prediction.Method,
+        prediction.ActivityModel,
+        new NumberWithUnit(prediction.IonicStrengthMolPerKg, "mol/kg"),
+        VolumeOf(prediction),
+        new NumberWithUnit(prediction.Mixture.WaterKg, "kg"),
+        TemperatureOf(prediction),
+        prediction.Species.Select(Describe).ToArray(),
+        prediction.Assumptions.Select(one => new AssumptionEntry(one.Code, one.Of, Finite(one.Figure), one.Limit, one.Held, one.Basis)).ToArray(),
+        prediction.Iterates.Select(one => new IterateEntry(one.PH, one.Correction)).ToArray(),
+        prediction.Cautions.Select(Describe).ToArray(),
+        Describe(prediction.Evidence),
+        prediction.Recipe.Notes);
+
+    private static NumberWithUnit VolumeOf(Prediction prediction) =>
+        prediction.Recipe.MakeUpTo is { Dimension: Dimension.Volume } mark
+            ? new NumberWithUnit(mark.Value, mark.Unit)
+            : new NumberWithUnit(prediction.Mixture.VolumeL, "L");
+
+    private static NumberWithUnit TemperatureOf(Prediction prediction) =>
+        prediction.Recipe.Temperature is { } stated
+            ? new NumberWithUnit(stated.Value, stated.Unit)
+            : new NumberWithUnit(25, "Cel");
+
+    private static SpeciesEntry Describe(PredictedSpecies one) => new(
+        one.Id,
+        one.Charge,
+        one.Family,
+        one.Display,
+        new NumberWithUnit(one.MolalityMolPerKg, "mol/kg"),
+        new NumberWithUnit(one.ConcentrationMolPerL, "mol/L"),
+        one.Fraction);
+
+    private static CautionEntry Describe(Caution one) =>
+        new(one.Code, one.Hazards, one.HazardsEu.Count == 0 ? null : one.HazardsEu, one.Text, one.Because);
+
+    private static EvidenceEntry Describe(Evidence evidence) => new(
+        new SoftwareEntry(evidence.Software.Version, evidence.Software.Target, evidence.Software.ProcessArchitecture),
+        new TableEntry(
+            evidence.Table.Edition,
+            evidence.Table.Sha256,
+            evidence.Table.Layers.Select(one => new LayerEntry(one.Name, one.Edition, one.Sha256)).ToArray()),
+        evidence.Constants.Select(Describe).ToArray(),
+        double.IsNaN(evidence.BracketLow) ? null : new List<double> { evidence.BracketLow, evidence.BracketHigh },
+        evidence.Evaluations,
+        evidence.Residual,
+        Finite(evidence.InputResolution));
+
+    private static ConstantEntry Describe(UsedConstant one) => new(
+        one.Id, one.Quantity, one.Value.Value, one.Value.Conditions, one.Value.Source.Citation, one.Value.KnownAs);
+
+    private static double? Finite(double? value) =>
+        value is double number && !double.IsNaN(number) && !double.IsInfinity(number) ? number : null;
+}
