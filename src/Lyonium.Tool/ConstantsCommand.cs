@@ -23,23 +23,22 @@ internal static class ConstantsCommand
     private static int Run(string? name)
     {
         var table = SubstanceTable.Default;
-        var text = new ConstantsText(table, Terminal.Create());
         if (name is null)
         {
-            text.PrintAll();
+            Terminal.Print(console => new ConstantsText(table, console).PrintAll());
             return ExitStatus.Done;
         }
 
         var substance = table.Find(name);
         if (substance.Success)
         {
-            text.Print(substance.Value);
+            Terminal.Print(console => new ConstantsText(table, console).Print(substance.Value));
             return ExitStatus.Done;
         }
 
         if (table.Families.FirstOrDefault(one => string.Equals(one.Id, name.Trim(), StringComparison.OrdinalIgnoreCase)) is { } family)
         {
-            text.Print(family);
+            Terminal.Print(console => new ConstantsText(table, console).Print(family));
             return ExitStatus.Done;
         }
 

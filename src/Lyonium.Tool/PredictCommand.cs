@@ -43,7 +43,7 @@ internal static class PredictCommand
         }
         else
         {
-            new PredictionText(prediction.Value).Print(Terminal.Create());
+            Terminal.Print(new PredictionText(prediction.Value).Print);
         }
 
         return ExitStatus.Done;

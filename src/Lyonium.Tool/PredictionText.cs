@@ -120,7 +120,7 @@ internal sealed class PredictionText(Prediction prediction)
         foreach (var one in prediction.Assumptions)
         {
             grid.AddRow(
-                new Text(one.Held ? "held" : "NOT HELD", one.Held ? Style.Plain : new Style(Color.Red, decoration: Decoration.Bold)),
+                new Text(one.Held ? (one.Limit is null ? "assumed" : "held") : "NOT HELD", one.Held ? Style.Plain : new Style(Color.Red, decoration: Decoration.Bold)),
                 new Text(one.Code.Replace('-', ' ') + (one.Of == "mixture" ? "" : " (" + one.Of + ")")),
                 new Text(Figure(one)));
         }
