@@ -20,6 +20,7 @@ internal sealed class LadderSet
         var ladders = rungs.Where(one => one.Rungs.Length > 1).ToArray();
         Start = new int[ladders.Length + 1];
         Total = new double[ladders.Length];
+        Component = Array.ConvertAll(ladders, one => one.Component);
         var species = new List<int>();
         var charge = new List<int>();
         var gap = new List<int>();
@@ -71,6 +72,9 @@ internal sealed class LadderSet
 
     /// <summary>Where each ladder's rungs start; one more entry than ladders.</summary>
     public int[] Start { get; }
+
+    /// <summary>The component of each ladder.</summary>
+    public int[] Component { get; }
 
     /// <summary>The total of each ladder, in mol/kg.</summary>
     public double[] Total { get; }
