@@ -10,9 +10,6 @@ internal struct ExactSum
     /// <summary>The sum, rounded once.</summary>
     public readonly double Value => _sum + _rest;
 
-    /// <summary>The sum and a further number, rounded once where they cancel.</summary>
-    public readonly double Plus(double value) => _sum + value + _rest;
-
     public void Add(double value)
     {
         var sum = _sum + value;

@@ -8,6 +8,9 @@ namespace Lyonium.Equilibria;
 /// <remarks>A component with a single rung (a spectator) has nothing to speciate; it only adds to the fixed charge.</remarks>
 internal sealed class LadderSet
 {
+    // A ratio of constants must be a double; chemistry needs a tenth of this.
+    private const int MostDecades = 300;
+
     public LadderSet(Equilibrium equilibrium)
     {
         var rungs = equilibrium.Species
@@ -36,6 +39,12 @@ internal sealed class LadderSet
                     throw new ArgumentException($"Two rungs of component {ladders[i].Component} have the same protons.");
                 }
 
+                if (below is not null && !(Math.Abs(one.Log10K - below.Log10K) <= MostDecades))
+                {
+                    throw new ArgumentException(
+                        $"Two neighbouring rungs of component {ladders[i].Component} have constants more than {MostDecades} decades apart.");
+                }
+
                 species.Add(index + Equilibrium.WaterIons);
                 charge.Add(one.Charge);
                 gap.Add(below is null ? 0 : one.Protons - below.Protons);
@@ -51,6 +60,7 @@ internal sealed class LadderSet
         Gap = gap.ToArray();
         Log10Ratio = ratio.ToArray();
         Ratio = Array.ConvertAll(Log10Ratio, log => Math.Pow(10, log));
+        LargestExponent = ratio.Select(Math.Abs).Append(Math.Abs(equilibrium.Solvent.PKw)).Max();
 
         var fixedCharge = default(ExactSum);
         SpectatorSpecies = new int[rungs.Length - ladders.Length];
@@ -93,6 +103,9 @@ internal sealed class LadderSet
 
     /// <summary>K of each rung over K of the one below it, activity coefficients all one.</summary>
     public double[] Ratio { get; }
+
+    /// <summary>The largest magnitude among the log10 ratios and pKw: rounding it is what a ratio may be off by.</summary>
+    public double LargestExponent { get; }
 
     public int[] SpectatorSpecies { get; }
 
