@@ -34,15 +34,24 @@ internal sealed class ApproximationRounds
         }
     }
 
+    /// <summary>
+    /// By how much the protons given and taken changed in the last round, relative to all that are exchanged: an answer can stand still
+    /// while the amounts behind it still move.
+    /// </summary>
+    public double Change { get; private set; } = double.PositiveInfinity;
+
     /// <summary>The next estimate of the hydrogen-ion molality; not above zero where more would dissociate than there is.</summary>
     public double Next()
     {
         _h = double.IsNaN(_h) ? First() : Corrected();
+        var (given, taken) = (_protolytes.ConvertAll(one => one.Given), _protolytes.ConvertAll(one => one.Taken));
         if (_h > 0 && _protolytes.Exists(one => !one.Correct(_h)))
         {
             return double.NaN;
         }
 
+        var moved = _protolytes.Select((one, i) => Math.Abs(one.Given - given[i]) + Math.Abs(one.Taken - taken[i])).Sum();
+        Change = moved / (_h + (_levels.IonProduct / _h) + Math.Abs(_levels.Rest) + _protolytes.Sum(one => one.Given + one.Taken));
         return _h;
     }
 

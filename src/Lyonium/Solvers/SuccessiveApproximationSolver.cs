@@ -71,7 +71,7 @@ public sealed class SuccessiveApproximationSolver : ISolver
             iterates.Add(new Iterate(-Math.Log10(h) - log10GammaH, iterates.Count == 0 ? 0 : -correction / Math.Log(10)));
             var rate = Math.Abs(correction / lastCorrection);
             var left = rate < 1 ? Math.Abs(correction) * Math.Max(rate / (1 - rate), 0.01) : double.PositiveInfinity;
-            if (correction == 0 || (Math.Abs(correction) <= tolerance && left <= tolerance))
+            if ((correction == 0 || (Math.Abs(correction) <= tolerance && left <= tolerance)) && rounds.Change <= tolerance)
             {
                 return Settled(iterates, correction == 0 ? 0 : left, tolerance);
             }
