@@ -1,7 +1,9 @@
 using System;
 using System.CommandLine;
+using Lyonium.Activity;
 using Lyonium.Predictions;
 using Lyonium.Records;
+using Lyonium.Solvers;
 using Lyonium.Substances;
 
 namespace Lyonium.Tool;
@@ -18,7 +20,7 @@ internal static class PredictCommand
         var command = new Command("predict", "Predicts the pH of a recipe.") { recipe, method, activity, format };
         command.SetAction(parsed => Run(
             parsed.GetValue(recipe)!,
-            new Predictor(SubstanceTable.Default, Plugins.Method(parsed.GetValue(method)!), Plugins.Activity(parsed.GetValue(activity)!)),
+            new Predictor(SubstanceTable.Default, Methods.Find(parsed.GetValue(method)!), ActivityModels.Find(parsed.GetValue(activity)!)),
             OutputFormat.IsJson(parsed.GetValue(format)!)));
         return command;
     }

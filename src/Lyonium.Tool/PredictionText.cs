@@ -63,12 +63,12 @@ internal sealed class PredictionText(Prediction prediction)
     {
         Heading(console, "Poured and weighed");
         var grid = Columns(0, 2);
-        foreach (var part in prediction.Mixture.Parts)
+        foreach (var part in prediction.Mixture.Parts.Where(part => part.Inside is null || part.Substance is not null))
         {
             Row(
                 grid,
-                part.Part.Taken.ToString(),
-                Describe(part),
+                part.Inside is null ? Taken(part.Part) : "",
+                (part.Inside is null ? "" : "  of which ") + Describe(part),
                 part.Substance is null ? "" : NumberFormat.Amount(part.AmountMol),
                 "");
         }
@@ -81,8 +81,12 @@ internal sealed class PredictionText(Prediction prediction)
         console.Write(grid);
     }
 
+    private static string Taken(Part part) => part is RecipePart { IsAll: true } ? "all" : part.Taken.ToString();
+
     private static string Describe(PreparedPart part) => part.Part switch
     {
+        RecipePart { Recipe.Name: { } name } => name,
+        RecipePart => "another recipe",
         SolutionPart { Stock: var stock } => part.Substance!.Name + " " + stock.Strength + (stock.Name is null ? "" : $"  ({stock.Name})"),
         SubstancePart { Purity: { } purity } => part.Substance!.Name + ", " + purity,
         SubstancePart => part.Substance!.Name,

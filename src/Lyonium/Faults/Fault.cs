@@ -7,8 +7,14 @@ namespace Lyonium.Faults;
 /// <remarks>Immutable; safe to share between threads.</remarks>
 public sealed class Fault
 {
-    private Fault(FaultKind kind, string path, string found, IReadOnlyDictionary<string, string> arguments)
+    private Fault(
+        FaultKind kind,
+        string path,
+        string found,
+        IReadOnlyDictionary<string, string> arguments,
+        IReadOnlyList<(double PH, double Correction)> iterates)
     {
+        Iterates = iterates;
         Kind = kind;
         Path = path;
         Found = found;
@@ -29,6 +35,9 @@ public sealed class Fault
 
     /// <summary>What fills the placeholders of the texts, by name.</summary>
     public IReadOnlyDictionary<string, string> Arguments { get; }
+
+    /// <summary>The estimates of a method that did not settle, each with its correction; empty for other faults.</summary>
+    public IReadOnlyList<(double PH, double Correction)> Iterates { get; }
 
     /// <summary>What is wrong, in a sentence.</summary>
     public string Message => Fill(Kind.Message);
@@ -56,8 +65,15 @@ public sealed class Fault
             values[name] = value;
         }
 
-        return new Fault(kind, path, shown, values);
+        return new Fault(kind, path, shown, values, []);
     }
+
+    /// <summary>The same fault with the estimates of a method that did not settle.</summary>
+    /// <param name="iterates">The estimates in pH, each with its correction.</param>
+    /// <returns>A new fault.</returns>
+    /// <exception cref="ArgumentNullException"><paramref name="iterates"/> is <see langword="null"/>.</exception>
+    public Fault WithIterates(IReadOnlyList<(double PH, double Correction)> iterates) =>
+        new(Kind, Path, Found, Arguments, iterates ?? throw new ArgumentNullException(nameof(iterates)));
 
     /// <summary>The fault on one line: code, place, message and remedy.</summary>
     /// <returns>One line of text.</returns>

@@ -150,9 +150,9 @@ public static class FaultKinds
     public static FaultKind TooManyParts { get; } = new(
         "LYO0410", "too many parts", "The recipe has {found} parts, and at most {limit} are read.", "split the recipe");
 
-    /// <summary>A recipe poured into a recipe.</summary>
-    public static FaultKind RecipeInRecipe { get; } = new(
-        "LYO0411", "recipe in a recipe", "A recipe poured into a recipe is not built yet.", "write the parts of the inner recipe here, scaled to what is poured");
+    /// <summary>More of a recipe than it makes.</summary>
+    public static FaultKind MoreThanTheRecipeMakes { get; } = new(
+        "LYO0411", "more than the recipe makes", "{found} is taken of a recipe that makes {makes}.", "take at most {makes}, or scale the recipe");
 
     /// <summary>Amounts so large that they overflow.</summary>
     public static FaultKind MixtureOverflows { get; } = new(
@@ -206,7 +206,7 @@ public static class FaultKinds
         UnknownSubstance, AmbiguousSubstance,
         TableStepOutOfOrder, TableDuplicate, TableMissingSource, TableBadFormula, TableBadLadder, TableNotBalanced, TableUnknownFamily, TableBadValue,
         EmptyRecipe, Contradictory, Incomplete, UnknownStock, DuplicateName, MarkBelowContents, NeedsDensity, StrongerThanPossible, NoWater,
-        TooManyParts, RecipeInRecipe, MixtureOverflows,
+        TooManyParts, MoreThanTheRecipeMakes, MixtureOverflows,
         TemperatureNotModelled, NotInThisTable,
         CoupledSpecies, FixedActivity, MethodDoesNotApply, DidNotSettle, MethodFailed,
         FileNotFound, IsAFolder, CannotRead,

@@ -60,6 +60,9 @@ public sealed class Prediction
     /// <summary>What was taken for granted.</summary>
     public required IReadOnlyList<Assumption> Assumptions { get; init; }
 
+    /// <summary>The formula of a short-cut, in words and symbols; <see langword="null"/> where the whole balance was solved.</summary>
+    public string? Formula { get; init; }
+
     /// <summary>The estimates of a method that repeats itself; empty for others.</summary>
     public required IReadOnlyList<Iterate> Iterates { get; init; }
 

@@ -1,3 +1,4 @@
+using System;
 using System.Collections.Generic;
 using System.Linq;
 using Lyonium.Faults;
@@ -8,7 +9,7 @@ using Lyonium.Water;
 namespace Lyonium.Recipes;
 
 /// <summary>Turns a recipe into a mixture: adds up what each part brings, and fills up to the mark.</summary>
-internal sealed class Preparation(Recipe recipe, SubstanceTable table)
+internal sealed class Preparation(Recipe recipe, SubstanceTable table, string root)
 {
     private const double MostKg = 1e9;
     private const double MostMol = 1e9;
@@ -22,7 +23,12 @@ internal sealed class Preparation(Recipe recipe, SubstanceTable table)
         var parts = new List<PreparedPart>(recipe.Parts.Count);
         for (var i = 0; i < recipe.Parts.Count; i++)
         {
-            if (Prepare(recipe.Parts[i], RecipeDraft.PathOf(i)) is { } prepared)
+            var path = RecipeDraft.PathOf(root, i);
+            if (recipe.Parts[i] is RecipePart inner)
+            {
+                parts.AddRange(PrepareRecipe(inner, path));
+            }
+            else if (Prepare(recipe.Parts[i], path) is { } prepared)
             {
                 parts.Add(prepared);
             }
@@ -33,10 +39,11 @@ internal sealed class Preparation(Recipe recipe, SubstanceTable table)
             return _faults.Attempt<Mixture>(null);
         }
 
-        var water = parts.Sum(part => part.WaterKg);
-        var volume = parts.Sum(part => part.VolumeL);
-        var mass = parts.Sum(part => part.MassKg);
-        var estimated = parts.Sum(part => part.EstimatedWaterKg);
+        double Sum(Func<PreparedPart, double> of) => parts.Where(part => part.Inside is null).Sum(of);
+        var water = Sum(part => part.WaterKg);
+        var volume = Sum(part => part.VolumeL);
+        var mass = Sum(part => part.MassKg);
+        var estimated = Sum(part => part.EstimatedWaterKg);
         if (recipe.MakeUpTo is { } mark)
         {
             var fill = Fill(mark, volume, mass);
@@ -44,7 +51,7 @@ internal sealed class Preparation(Recipe recipe, SubstanceTable table)
             mass += fill;
             var isVolume = mark.Dimension == Dimension.Volume;
             volume = isVolume ? mark.Computed : volume + (fill / _waterDensity);
-            estimated += isVolume ? parts.Sum(part => part.EstimatedVolumeL) * _waterDensity : 0;
+            estimated += isVolume ? Sum(part => part.EstimatedVolumeL) * _waterDensity : 0;
         }
 
         CheckTotals(parts, water, mass);
@@ -113,6 +120,42 @@ internal sealed class Preparation(Recipe recipe, SubstanceTable table)
         };
     }
 
+    // A volume is measured at this recipe's temperature of preparation; it holds the mass that it would hold of water.
+    private IEnumerable<PreparedPart> PrepareRecipe(RecipePart part, string path)
+    {
+        var attempt = Mixture.TryPrepare(part.Recipe, table, path + ".recipe");
+        if (!attempt.Success)
+        {
+            _faults.AddRange(attempt.Faults);
+            return [];
+        }
+
+        var whole = attempt.Value;
+        var volume = whole.VolumeL * WaterDensity.KgPerL(part.Recipe.PreparedAtK) / _waterDensity;
+        var share = part.Taken.Dimension switch
+        {
+            Dimension.Volume => part.Taken.Computed / volume,
+            Dimension.Mass => part.Taken.Computed / whole.MassKg,
+            _ => part.Taken.Computed,
+        };
+        if (share > 1 + 1e-12)
+        {
+            var makes = part.Taken.Dimension == Dimension.Volume ? Rounded(volume) + " L" : Rounded(whole.MassKg) + " kg";
+            _faults.Add(FaultKinds.MoreThanTheRecipeMakes, path, part.Taken.ToString(), ("makes", makes));
+            return [];
+        }
+
+        var poured = new PreparedPart
+        {
+            Part = part,
+            WaterKg = whole.WaterKg,
+            VolumeL = volume,
+            MassKg = whole.MassKg,
+            EstimatedWaterKg = whole.EstimatedWaterKg,
+        };
+        return whole.Parts.Select(inner => inner.Scaled(share, part)).Prepend(poured.Scaled(share, part) with { Inside = null });
+    }
+
     private double Fill(Measure mark, double volume, double mass)
     {
         var isVolume = mark.Dimension == Dimension.Volume;
@@ -121,7 +164,7 @@ internal sealed class Preparation(Recipe recipe, SubstanceTable table)
         if (missing < -1e-12 * contents)
         {
             var unit = isVolume ? " L" : " kg";
-            _faults.Add(FaultKinds.MarkBelowContents, "$.makeUpTo", mark.ToString(), ("contents", Rounded(contents) + unit));
+            _faults.Add(FaultKinds.MarkBelowContents, root + ".makeUpTo", mark.ToString(), ("contents", Rounded(contents) + unit));
         }
 
         return missing <= 0 ? 0 : isVolume ? missing * _waterDensity : missing;
@@ -132,11 +175,11 @@ internal sealed class Preparation(Recipe recipe, SubstanceTable table)
         var amount = parts.Sum(part => part.AmountMol);
         if (!(mass <= MostKg && amount <= MostMol && !(water > 0 && amount / water > MostMolPerKg)))
         {
-            _faults.Add(FaultKinds.MixtureOverflows, "$.parts", $"{Rounded(mass)} kg, {Rounded(amount)} mol and {Rounded(water)} kg of water");
+            _faults.Add(FaultKinds.MixtureOverflows, root + ".parts", $"{Rounded(mass)} kg, {Rounded(amount)} mol and {Rounded(water)} kg of water");
         }
         else if (!(water > 0))
         {
-            _faults.Add(FaultKinds.NoWater, "$.parts", Rounded(water) + " kg of water");
+            _faults.Add(FaultKinds.NoWater, root + ".parts", Rounded(water) + " kg of water");
         }
     }
 

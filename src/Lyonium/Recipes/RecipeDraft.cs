@@ -25,7 +25,16 @@ internal sealed class RecipeDraft
     private Measure? _preparedAt;
     private Measure? _makeUpTo;
 
-    public RecipeDraft(FaultList? faults = null) => Faults = faults ?? new FaultList();
+    private readonly string _root;
+
+    /// <summary>Starts a draft.</summary>
+    /// <param name="faults">Where faults are told.</param>
+    /// <param name="root">Where the recipe stands: <c>$</c>, or the place of a recipe inside another.</param>
+    public RecipeDraft(FaultList faults, string root)
+    {
+        Faults = faults;
+        _root = root;
+    }
 
     public FaultList Faults { get; }
 
@@ -36,28 +45,28 @@ internal sealed class RecipeDraft
     public string? Notes { get; set; }
 
     /// <summary>Where the next part will stand.</summary>
-    public string NextPath => PathOf(_positions);
+    public string NextPath => PathOf(_root, _positions);
 
-    public static string PathOf(int position) => "$.parts[" + position.ToString(CultureInfo.InvariantCulture) + "]";
+    public static string PathOf(string root, int position) => root + ".parts[" + position.ToString(CultureInfo.InvariantCulture) + "]";
 
-    public void SetTemperature(Measure? temperature) => _temperature = Between0And100(temperature, "$.temperature");
+    public void SetTemperature(Measure? temperature) => _temperature = Between0And100(temperature, _root + ".temperature");
 
-    public void SetPreparedAt(Measure? temperature) => _preparedAt = Between0And100(temperature, "$.preparedAt");
+    public void SetPreparedAt(Measure? temperature) => _preparedAt = Between0And100(temperature, _root + ".preparedAt");
 
     public void SetMakeUpTo(Measure? mark)
     {
-        if (mark is null || MeasureReader.Check(mark, "$.makeUpTo", mark.ToString(), Faults) is null)
+        if (mark is null || MeasureReader.Check(mark, _root + ".makeUpTo", mark.ToString(), Faults) is null)
         {
             return;
         }
 
         if (mark.Computed == 0)
         {
-            Faults.Add(FaultKinds.Zero, "$.makeUpTo", mark.ToString(), MeasureReader.Expected(mark.Dimension));
+            Faults.Add(FaultKinds.Zero, _root + ".makeUpTo", mark.ToString(), MeasureReader.Expected(mark.Dimension));
         }
         else if (_makeUpTo is not null)
         {
-            Faults.Add(FaultKinds.Contradictory, "$.makeUpTo", $"the marks {_makeUpTo} and {mark}");
+            Faults.Add(FaultKinds.Contradictory, _root + ".makeUpTo", $"the marks {_makeUpTo} and {mark}");
         }
 
         _makeUpTo = mark;
@@ -77,7 +86,7 @@ internal sealed class RecipeDraft
         }
         else if (!same.Equals(stock))
         {
-            Faults.Add(FaultKinds.DuplicateName, "$.stocks", stock.Name);
+            Faults.Add(FaultKinds.DuplicateName, _root + ".stocks", stock.Name);
         }
     }
 
@@ -118,6 +127,17 @@ internal sealed class RecipeDraft
         _positions++;
     }
 
+    /// <summary>Adds a recipe, or a volume or mass of it.</summary>
+    public void AddRecipe(Recipe? recipe, Measure? taken, string? id)
+    {
+        if (recipe is not null && Checked(taken) is { } sound)
+        {
+            AddPart(new RecipePart(recipe, sound, id));
+        }
+
+        _positions++;
+    }
+
     /// <summary>Counts a part that was refused before it could be added.</summary>
     public void SkipPart() => _positions++;
 
@@ -125,13 +145,13 @@ internal sealed class RecipeDraft
     {
         if (_positions == 0)
         {
-            Faults.Add(FaultKinds.EmptyRecipe, "$.parts", "");
+            Faults.Add(FaultKinds.EmptyRecipe, _root + ".parts", "");
         }
         else if (_positions > Recipe.MostParts)
         {
             Faults.Add(
                 FaultKinds.TooManyParts,
-                "$.parts",
+                _root + ".parts",
                 _positions.ToString(CultureInfo.InvariantCulture),
                 ("limit", Recipe.MostParts.ToString(CultureInfo.InvariantCulture)));
             return Faults.Attempt<Recipe>(null);
@@ -139,15 +159,15 @@ internal sealed class RecipeDraft
 
         CheckIds();
         var resolver = new SubstanceResolver(table, Faults);
-        var stocks = _stocks.Select(stock => resolver.Resolve(stock, "$.stocks." + stock.Name)).ToArray();
-        var parts = _parts.Select((part, index) => resolver.Resolve(part, PathOf(_positionOf[index]))).ToArray();
+        var stocks = _stocks.Select(stock => resolver.Resolve(stock, _root + ".stocks." + stock.Name)).ToArray();
+        var parts = _parts.Select((part, index) => resolver.Resolve(part, PathOf(_root, _positionOf[index]))).ToArray();
         if (Faults.Any)
         {
             return Faults.Attempt<Recipe>(null);
         }
 
         var recipe = new Recipe(Id, Name, _temperature, _preparedAt, Array.AsReadOnly(stocks), Array.AsReadOnly(parts), _makeUpTo, Notes);
-        Faults.AddRange(Mixture.TryPrepare(recipe, table).Faults);
+        Faults.AddRange(Mixture.TryPrepare(recipe, table, _root).Faults);
         return Faults.Attempt(recipe);
     }
 
@@ -164,6 +184,7 @@ internal sealed class RecipeDraft
     {
         Dimension.Mass => "mass",
         Dimension.Amount => "amount",
+        Dimension.MassFraction => "recipe",
         _ => "volume",
     };
 
@@ -195,7 +216,7 @@ internal sealed class RecipeDraft
         {
             if (_parts[i].Id is { } id && !taken.Add(id))
             {
-                Faults.Add(FaultKinds.DuplicateName, PathOf(_positionOf[i]) + ".id", id);
+                Faults.Add(FaultKinds.DuplicateName, PathOf(_root, _positionOf[i]) + ".id", id);
             }
         }
     }

@@ -58,4 +58,17 @@ internal sealed record RecordDocument(
 
 internal sealed record FaultEntry(string Code, string Path, string Found, string Message, string Remedy);
 
-internal sealed record FaultsDocument(string Format, IReadOnlyList<FaultEntry> Faults);
+internal sealed record FaultsDocument(string Format, IReadOnlyList<FaultEntry> Faults, IReadOnlyList<IterateEntry>? Iterates);
+
+internal sealed record ComparisonRowEntry(
+    string Method,
+    [property: JsonPropertyName("pH"), JsonIgnore(Condition = JsonIgnoreCondition.Never)] double? PH,
+    double? Deviation,
+    bool? WithinTolerance,
+    string? Reason,
+    string? Formula,
+    IReadOnlyList<AssumptionEntry> Assumptions,
+    IReadOnlyList<IterateEntry> Iterates);
+
+internal sealed record ComparisonDocument(
+    string Format, string? Id, string ActivityModel, double Tolerance, IReadOnlyList<ComparisonRowEntry> Rows);

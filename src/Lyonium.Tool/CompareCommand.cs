@@ -1,0 +1,64 @@
+using System;
+using System.CommandLine;
+using Lyonium.Activity;
+using Lyonium.Predictions;
+using Lyonium.Records;
+using Lyonium.Substances;
+
+namespace Lyonium.Tool;
+
+/// <summary><c>lyonium compare</c>: every method side by side.</summary>
+internal static class CompareCommand
+{
+    public static Command Create()
+    {
+        var recipe = new Argument<string>("RECIPE") { Description = "a file of lyonium-recipe/1, or - for standard input" };
+        var activity = Plugins.ActivityOption();
+        var tolerance = new Option<double>("--tolerance")
+        {
+            Description = "how far from the exact answer still counts as right, in pH",
+            DefaultValueFactory = _ => Comparison.DefaultTolerance,
+        };
+        tolerance.Validators.Add(result =>
+        {
+            if (!(result.GetValueOrDefault<double>() is > 0 and < double.PositiveInfinity))
+            {
+                result.AddError("The tolerance is a number above 0.");
+            }
+        });
+        var format = OutputFormat.Option();
+        var command = new Command("compare", "Predicts a recipe with every method, beside the exact answer.") { recipe, activity, tolerance, format };
+        command.SetAction(parsed => Run(
+            parsed.GetValue(recipe)!,
+            new Predictor(SubstanceTable.Default, activityModel: ActivityModels.Find(parsed.GetValue(activity)!)),
+            parsed.GetValue(tolerance),
+            OutputFormat.IsJson(parsed.GetValue(format)!)));
+        return command;
+    }
+
+    private static int Run(string file, Predictor predictor, double tolerance, bool asJson)
+    {
+        var recipe = RecipeFile.Read(file, predictor.Table);
+        if (!recipe.Success)
+        {
+            return OutputFormat.Print(recipe.Faults, asJson);
+        }
+
+        var comparison = predictor.TryCompare(recipe.Value, tolerance);
+        if (!comparison.Success)
+        {
+            return OutputFormat.Print(comparison.Faults, asJson);
+        }
+
+        if (asJson)
+        {
+            Console.Out.WriteLine(ComparisonJson.Write(comparison.Value));
+        }
+        else
+        {
+            Terminal.Print(new ComparisonText(comparison.Value).Print);
+        }
+
+        return ExitStatus.Done;
+    }
+}
