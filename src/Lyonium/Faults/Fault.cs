@@ -1,5 +1,6 @@
 using System;
 using System.Collections.Generic;
+using System.Text;
 
 namespace Lyonium.Faults;
 
@@ -7,6 +8,9 @@ namespace Lyonium.Faults;
 /// <remarks>Immutable; safe to share between threads.</remarks>
 public sealed class Fault
 {
+    private const int LongestFound = 120;
+    private const int LongestArgument = 500;
+
     private Fault(
         FaultKind kind,
         string path,
@@ -58,14 +62,14 @@ public sealed class Fault
         _ = path ?? throw new ArgumentNullException(nameof(path));
         _ = found ?? throw new ArgumentNullException(nameof(found));
         _ = arguments ?? throw new ArgumentNullException(nameof(arguments));
-        var shown = Shorten(found);
+        var shown = Shown(found, LongestFound);
         var values = new SortedDictionary<string, string>(StringComparer.Ordinal) { ["found"] = shown };
         foreach (var (name, value) in arguments)
         {
-            values[name] = value;
+            values[name] = Shown(value, LongestArgument);
         }
 
-        return new Fault(kind, path, shown, values, []);
+        return new Fault(kind, Shown(path, LongestArgument), shown, values, []);
     }
 
     /// <summary>The same fault with the estimates of a method that did not settle.</summary>
@@ -79,21 +83,55 @@ public sealed class Fault
     /// <returns>One line of text.</returns>
     public override string ToString() => $"{Code} at {Path}: {Message} Remedy: {Remedy}.";
 
-    // What a hostile client sends must not fill a host's log.
-    private static string Shorten(string found)
+    // What a hostile client sends must not fill a host's log, break its lines or steer its terminal.
+    private static string Shown(string text, int longest)
     {
-        const int longest = 120;
-        var line = found.Length > longest ? found.Substring(0, longest - 1) + "…" : found;
-        return line.Replace('\r', ' ').Replace('\n', ' ');
-    }
-
-    private string Fill(string template)
-    {
-        foreach (var argument in Arguments)
+        var cut = text.Length <= longest ? text.Length : longest - 1;
+        if (cut < text.Length && char.IsHighSurrogate(text[cut - 1]))
         {
-            template = template.Replace("{" + argument.Key + "}", argument.Value);
+            cut--;
         }
 
-        return template;
+        var line = new StringBuilder(cut + 1);
+        for (var i = 0; i < cut; i++)
+        {
+            var isPair = char.IsHighSurrogate(text[i]) && i + 1 < cut && char.IsLowSurrogate(text[i + 1]);
+            if (isPair)
+            {
+                line.Append(text[i]).Append(text[++i]);
+            }
+            else if (char.IsSurrogate(text[i]))
+            {
+                line.Append('\ufffd');
+            }
+            else
+            {
+                line.Append(char.IsControl(text[i]) || text[i] is '\u2028' or '\u2029' ? ' ' : text[i]);
+            }
+        }
+
+        return cut < text.Length ? line.Append('…').ToString() : line.ToString();
+    }
+
+    // In one pass, so that what was found is never taken for a placeholder.
+    private string Fill(string template)
+    {
+        var filled = new StringBuilder(template.Length * 2);
+        var at = 0;
+        while (at < template.Length)
+        {
+            var end = template[at] == '{' ? template.IndexOf('}', at) : -1;
+            if (end > 0 && Arguments.TryGetValue(template.Substring(at + 1, end - at - 1), out var value))
+            {
+                filled.Append(value);
+                at = end + 1;
+            }
+            else
+            {
+                filled.Append(template[at++]);
+            }
+        }
+
+        return filled.ToString();
     }
 }

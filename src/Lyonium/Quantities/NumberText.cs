@@ -1,3 +1,4 @@
+using System;
 using System.Globalization;
 
 namespace Lyonium.Quantities;
@@ -66,6 +67,30 @@ internal static class NumberText
     /// <summary>The number; infinite where it is beyond what a double holds.</summary>
     public static double Parse(string number) =>
         double.TryParse(number, NumberStyles.Float, CultureInfo.InvariantCulture, out var value) ? value : double.PositiveInfinity;
+
+    /// <summary>The double nearest to the number's shortest text times a power of ten.</summary>
+    public static double MovePoint(double value, int power)
+    {
+        if (power == 0 || value == 0 || double.IsNaN(value) || double.IsInfinity(value))
+        {
+            return value;
+        }
+
+        var text = Shortest(value);
+        var exponentAt = text.IndexOf('E');
+        var exponent = exponentAt < 0 ? 0 : int.Parse(text.Substring(exponentAt + 1), NumberStyles.AllowLeadingSign, CultureInfo.InvariantCulture);
+        var digits = exponentAt < 0 ? text : text.Substring(0, exponentAt);
+        return Parse(digits + "E" + (exponent + power).ToString(CultureInfo.InvariantCulture));
+    }
+
+    /// <summary>The double nearest to the number's shortest text plus 273.15.</summary>
+    public static double KelvinOfCelsius(double celsius)
+    {
+        // Beyond what a decimal holds exactly there is no last digit to keep.
+        return Math.Abs(celsius) is > 1e-9 and < 1e9
+            ? Parse((decimal.Parse(Shortest(celsius), NumberStyles.Float, CultureInfo.InvariantCulture) + 273.15m).ToString(CultureInfo.InvariantCulture))
+            : celsius + 273.15;
+    }
 
     private static int Digits(string text, ref int at)
     {
