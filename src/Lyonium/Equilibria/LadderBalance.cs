@@ -30,7 +30,7 @@ internal ref struct LadderBalance
     private double _inverseGammaH;
     private double _inverseGammaOH;
     private double _gammasAt;
-    private double _exponentNoise;
+    private double _gammaNoise;
 
     /// <summary>Starts from activity coefficients of one.</summary>
     /// <param name="equilibrium">An equilibrium of ladders.</param>
@@ -57,7 +57,6 @@ internal ref struct LadderBalance
 
         _inverseGammaH = 1;
         _inverseGammaOH = 1;
-        _exponentNoise = HalfLastDigit * _ladders.LargestExponent;
     }
 
     /// <summary>The net charge, in mol/kg; it falls with pH.</summary>
@@ -73,10 +72,10 @@ internal ref struct LadderBalance
     public double Moving { get; private set; }
 
     /// <summary>
-    /// A bound on the relative rounding error of a share: twelve roundings for each rung of distance, and what a power of ten loses when
-    /// its exponent is rounded.
+    /// A bound on the relative rounding error of a share: at most sixteen roundings for each rung of distance, and what its activity
+    /// coefficients may be off by.
     /// </summary>
-    public readonly double RelativeNoise => (12 * HalfLastDigit) + (Math.Log(10) * _exponentNoise);
+    public readonly double RelativeNoise => (16 * HalfLastDigit) + (Math.Log(10) * _gammaNoise);
 
     /// <summary>A bound on the rounding error of the net charge, in mol/kg: beyond it the sign is certain.</summary>
     public readonly double Noise => RelativeNoise * Moving;
@@ -109,7 +108,7 @@ internal ref struct LadderBalance
         {
             Speciate(activity);
             var miss = IonicStrength - _gammasAt;
-            if (round > 0 && change <= 1e-14 && Math.Abs(miss) <= 4e-16 * IonicStrength)
+            if (round > 0 && change <= 1e-15 && Math.Abs(miss) <= 4e-16 * IonicStrength)
             {
                 return true;
             }
@@ -181,7 +180,7 @@ internal ref struct LadderBalance
         }
 
         _gammasAt = ionicStrength;
-        _exponentNoise = (HalfLastDigit * (_ladders.LargestExponent + (8 * largest))) + change;
+        _gammaNoise = (8 * HalfLastDigit * largest) + change;
         if (change == 0)
         {
             return 0;
@@ -196,7 +195,7 @@ internal ref struct LadderBalance
             if (_ladders.Gap[i] > 0)
             {
                 var shift = _log10Gammas[_ladders.Species[i - 1]] - _log10Gammas[_ladders.Species[i]];
-                _ratios[i] = Math.Pow(10, _ladders.Log10Ratio[i] + shift);
+                _ratios[i] = _ladders.Ratio[i] * Math.Pow(10, shift);
             }
         }
 

@@ -27,6 +27,7 @@ internal sealed class LadderSet
         var species = new List<int>();
         var charge = new List<int>();
         var gap = new List<int>();
+        var log10Ratio = new List<double>();
         var ratio = new List<double>();
         for (var i = 0; i < ladders.Length; i++)
         {
@@ -48,7 +49,8 @@ internal sealed class LadderSet
                 species.Add(index + Equilibrium.WaterIons);
                 charge.Add(one.Charge);
                 gap.Add(below is null ? 0 : one.Protons - below.Protons);
-                ratio.Add(below is null ? 0 : one.Log10K - below.Log10K);
+                log10Ratio.Add(below is null ? 0 : one.Log10K - below.Log10K);
+                ratio.Add(below is null ? 0 : PowerOfDifference(one.Log10K, below.Log10K));
                 below = one;
             }
 
@@ -58,9 +60,8 @@ internal sealed class LadderSet
         Species = species.ToArray();
         Charge = charge.ToArray();
         Gap = gap.ToArray();
-        Log10Ratio = ratio.ToArray();
-        Ratio = Array.ConvertAll(Log10Ratio, log => Math.Pow(10, log));
-        LargestExponent = ratio.Select(Math.Abs).Append(Math.Abs(equilibrium.Solvent.PKw)).Max();
+        Log10Ratio = log10Ratio.ToArray();
+        Ratio = ratio.ToArray();
 
         var fixedCharge = default(ExactSum);
         SpectatorSpecies = new int[rungs.Length - ladders.Length];
@@ -104,9 +105,6 @@ internal sealed class LadderSet
     /// <summary>K of each rung over K of the one below it, activity coefficients all one.</summary>
     public double[] Ratio { get; }
 
-    /// <summary>The largest magnitude among the log10 ratios and pKw: rounding it is what a ratio may be off by.</summary>
-    public double LargestExponent { get; }
-
     public int[] SpectatorSpecies { get; }
 
     public double[] SpectatorTotal { get; }
@@ -118,4 +116,15 @@ internal sealed class LadderSet
 
     /// <summary>Σ|z|m of the spectators, in mol/kg.</summary>
     public double SpectatorChargeMagnitude { get; }
+
+    // 10^(a − b), with what rounding drops of the difference.
+    private static double PowerOfDifference(double a, double b)
+    {
+        var difference = default(ExactSum);
+        difference.Add(a);
+        difference.Add(-b);
+        var rounded = difference.Value;
+        difference.Add(-rounded);
+        return Math.Pow(10, rounded) * (1 + (Math.Log(10) * difference.Value));
+    }
 }

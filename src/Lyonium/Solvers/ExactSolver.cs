@@ -83,6 +83,9 @@ public sealed class ExactSolver : ISolver
             _settled = true;
         }
 
+        // By how much the charge falls for each unit of pH, activity coefficients held.
+        private readonly double Slope => Math.Log(10) * (_balance.Rising + _balance.Falling);
+
         public SolverOutcome Run()
         {
             var pH = -Math.Log10(FindZero());
@@ -113,7 +116,7 @@ public sealed class ExactSolver : ISolver
                 var shrinks = Math.Max(Math.Abs(step), _balance.GammasMove ? rate : rate * rate);
                 var move = _balance.GammasMove ? Secant(step, lastStep, lastMove) : step;
                 var next = activity * Math.Exp(move);
-                if (Math.Abs(step) * shrinks <= _balance.RelativeNoise)
+                if (Math.Abs(step) * shrinks <= 2 * _balance.RelativeNoise)
                 {
                     return next;
                 }
@@ -157,7 +160,7 @@ public sealed class ExactSolver : ISolver
         private SolverOutcome Certify(double pH)
         {
             // The first guess is as narrow as rounding lets the signs be certain; it nearly always holds.
-            var narrow = (2 * Math.Max(1, Math.Abs(pH)) * LastDigit) + _balance.RelativeNoise;
+            var narrow = (1.5 * Math.Max(1, Math.Abs(pH)) * LastDigit) + (1.5 * _balance.Noise / Slope);
             double low = pH, high = pH, lowCharge = 0, highCharge = 0;
             for (var reach = narrow; lowCharge <= 0 && reach < 1; reach *= 4)
             {
@@ -213,10 +216,8 @@ public sealed class ExactSolver : ISolver
 
         private readonly SolverOutcome Answer(double low, double high, double jump)
         {
-            var slope = Math.Log(10) * (_balance.Rising + _balance.Falling);
-
             // Beyond its range an activity model can make the balance jump; a jump is not a zero.
-            if (!_settled || high - low > WidestBracket || jump > 1e3 * slope * (high - low))
+            if (!_settled || high - low > WidestBracket || jump > 1e3 * Slope * (high - low))
             {
                 return NotSettled("the charge balance jumps over zero, so that no pH fulfils it");
             }
@@ -228,7 +229,7 @@ public sealed class ExactSolver : ISolver
                 BracketLow = low,
                 BracketHigh = high,
                 Evaluations = _evaluations,
-                InputResolution = 0.5 * LastDigit * _balance.FixedMagnitude / slope,
+                InputResolution = 0.5 * LastDigit * _balance.FixedMagnitude / Slope,
             };
         }
 
