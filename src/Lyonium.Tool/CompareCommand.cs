@@ -3,7 +3,6 @@ using System.CommandLine;
 using Lyonium.Activity;
 using Lyonium.Predictions;
 using Lyonium.Records;
-using Lyonium.Substances;
 
 namespace Lyonium.Tool;
 
@@ -26,19 +25,27 @@ internal static class CompareCommand
                 result.AddError("The tolerance is a number above 0.");
             }
         });
+        var table = TableOption.Create();
         var format = OutputFormat.Option();
-        var command = new Command("compare", "Predicts a recipe with every method, beside the exact answer.") { recipe, activity, tolerance, format };
-        command.SetAction(parsed => Run(
-            parsed.GetValue(recipe)!,
-            new Predictor(SubstanceTable.Default, activityModel: ActivityModels.Find(parsed.GetValue(activity)!)),
-            parsed.GetValue(tolerance),
-            OutputFormat.IsJson(parsed.GetValue(format)!)));
+        var command = new Command("compare", "Predicts a recipe with every method, beside the exact answer.") { recipe, activity, tolerance, table, format };
+        command.SetAction(parsed =>
+        {
+            var asJson = OutputFormat.IsJson(parsed.GetValue(format)!);
+            var opened = TableOption.Open(parsed.GetValue(table));
+            if (!opened.Success)
+            {
+                return OutputFormat.Print(opened.Faults, asJson);
+            }
+
+            var predictor = new Predictor(opened.Value, activityModel: ActivityModels.Find(parsed.GetValue(activity)!));
+            return Run(parsed.GetValue(recipe)!, predictor, parsed.GetValue(tolerance), asJson);
+        });
         return command;
     }
 
     private static int Run(string file, Predictor predictor, double tolerance, bool asJson)
     {
-        var recipe = RecipeFile.Read(file, predictor.Table);
+        var recipe = InputFile.ReadRecipe(file, predictor.Table);
         if (!recipe.Success)
         {
             return OutputFormat.Print(recipe.Faults, asJson);

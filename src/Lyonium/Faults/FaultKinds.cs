@@ -70,6 +70,10 @@ public static class FaultKinds
     public static FaultKind WrongType { get; } = new(
         "LYO0208", "wrong type", "Here {expected} is wanted, and {actual} was found.", "give {expected}");
 
+    /// <summary>A name that must be one of a few.</summary>
+    public static FaultKind NotAmongThese { get; } = new(
+        "LYO0209", "not among these", "'{found}' is not known here.", "use one of {known}");
+
     /// <summary>A substance that the table does not have.</summary>
     public static FaultKind UnknownSubstance { get; } = new(
         "LYO0301", "unknown substance", "'{found}' is not in the table.", "{suggestion}");
@@ -109,6 +113,10 @@ public static class FaultKinds
     /// <summary>A value of a table that cannot be right.</summary>
     public static FaultKind TableBadValue { get; } = new(
         "LYO0318", "bad value in the table", "'{found}' cannot stand here: {detail}.", "correct the value");
+
+    /// <summary>A family of a layer that ends in another base form than the one whose place it takes.</summary>
+    public static FaultKind TableChangesBase { get; } = new(
+        "LYO0319", "another base form", "The family '{family}' ends in {found}, and the one whose place it takes in {base}.", "end the forms in {base}, or give the family an id of its own");
 
     /// <summary>A recipe without parts.</summary>
     public static FaultKind EmptyRecipe { get; } = new(
@@ -202,9 +210,9 @@ public static class FaultKinds
     public static IReadOnlyList<FaultKind> All { get; } =
     [
         WrongDimension, NotAQuantity, DecimalComma, UnknownUnit, Negative, Zero, NotFinite, OutOfRange,
-        NotJson, TooLarge, WrongFormat, FormatTooNew, UnknownProperty, DuplicateProperty, MissingProperty, WrongType,
+        NotJson, TooLarge, WrongFormat, FormatTooNew, UnknownProperty, DuplicateProperty, MissingProperty, WrongType, NotAmongThese,
         UnknownSubstance, AmbiguousSubstance,
-        TableStepOutOfOrder, TableDuplicate, TableMissingSource, TableBadFormula, TableBadLadder, TableNotBalanced, TableUnknownFamily, TableBadValue,
+        TableStepOutOfOrder, TableDuplicate, TableMissingSource, TableBadFormula, TableBadLadder, TableNotBalanced, TableUnknownFamily, TableBadValue, TableChangesBase,
         EmptyRecipe, Contradictory, Incomplete, UnknownStock, DuplicateName, MarkBelowContents, NeedsDensity, StrongerThanPossible, NoWater,
         TooManyParts, MoreThanTheRecipeMakes, MixtureOverflows,
         TemperatureNotModelled, NotInThisTable,

@@ -145,13 +145,11 @@ public sealed class Predictor
     {
         var mixture = answer.Modelled.Mixture;
         var species = answer.Species();
-        return new Prediction(mixture, Method.Name, ActivityModel.Name, answer.Outcome.PH, answer.Speciation)
+        return new Prediction(answer, Method.Name, ActivityModel.Name)
         {
             PHydrogenConcentration = -Math.Log10(species[Equilibrium.HydrogenIon].ConcentrationMolPerL),
             Species = species,
             Assumptions = assumptions,
-            Formula = answer.Outcome.Formula,
-            Iterates = answer.Outcome.Iterates,
             Cautions = CautionTable.Default.For(mixture),
             Evidence = new Evidence
             {

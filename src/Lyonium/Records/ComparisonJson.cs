@@ -31,7 +31,6 @@ public static class ComparisonJson
         row.Deviation,
         row.WithinTolerance,
         row.Reason,
-        row.Formula,
         row.Assumptions.Select(EntryOf.Assumption).ToArray(),
         row.Iterates.Select(EntryOf.Iterate).ToArray());
 }

@@ -26,7 +26,7 @@ internal sealed record LayerEntry(string Name, string Edition, string Sha256);
 
 internal sealed record TableEntry(string Edition, string Sha256, IReadOnlyList<LayerEntry> Layers);
 
-internal sealed record ConstantEntry(string Id, string Quantity, double Value, string? At, string Source, string Known);
+internal sealed record ConstantEntry(string Id, string Quantity, double Value, string? At, string Source, string Known, string? Layer);
 
 internal sealed record EvidenceEntry(
     SoftwareEntry Software,
@@ -66,7 +66,6 @@ internal sealed record ComparisonRowEntry(
     double? Deviation,
     bool? WithinTolerance,
     string? Reason,
-    string? Formula,
     IReadOnlyList<AssumptionEntry> Assumptions,
     IReadOnlyList<IterateEntry> Iterates);
 

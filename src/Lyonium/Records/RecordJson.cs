@@ -76,5 +76,5 @@ public static class RecordJson
         EntryOf.Finite(evidence.InputResolution));
 
     private static ConstantEntry Describe(UsedConstant one) => new(
-        one.Id, one.Quantity, one.Value.Value, one.Value.Conditions, one.Value.Source.Citation, one.Value.KnownAs);
+        one.Id, one.Quantity, one.Value.Value, one.Value.Conditions, one.Value.Source.Citation, one.Value.KnownAs, one.Layer);
 }
