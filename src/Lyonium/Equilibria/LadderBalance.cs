@@ -126,7 +126,7 @@ internal ref struct LadderBalance
             lastAt = _gammasAt;
             lastMiss = miss;
             change = UseGammasAt(next);
-            if (change == 0)
+            if (change == 0 && next == IonicStrength)
             {
                 return true;
             }
@@ -139,7 +139,7 @@ internal ref struct LadderBalance
             if (!double.IsInfinity(high) && high - low <= 4e-16 * high)
             {
                 Speciate(activity);
-                return true;
+                return Math.Abs(IonicStrength - _gammasAt) <= 1e-13 * IonicStrength;
             }
         }
 
