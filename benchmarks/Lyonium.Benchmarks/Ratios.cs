@@ -10,7 +10,7 @@ namespace Lyonium.Benchmarks;
 internal static class Ratios
 {
     private const int Rounds = 61;
-    private const int Solves = 4000;
+    private const int Solves = 1000;
 
     public static void Print()
     {
