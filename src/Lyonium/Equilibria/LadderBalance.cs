@@ -108,16 +108,22 @@ internal ref struct LadderBalance
         {
             Speciate(activity);
             var miss = IonicStrength - _gammasAt;
-            if (round > 0 && change <= 1e-15 && Math.Abs(miss) <= 4e-16 * IonicStrength)
+            if (round > 0 && Math.Abs(miss) <= 1e-9 * IonicStrength)
             {
-                return true;
+                // What the last two rounds say that the coefficients are still off by.
+                var left = miss == 0 ? 0 : change * Math.Abs(miss / (miss - lastMiss));
+                if (left <= 1e-16 || Math.Abs(miss) <= 1e-15 * IonicStrength)
+                {
+                    _gammaNoise += left;
+                    return true;
+                }
             }
 
             if (miss > 0)
             {
                 low = _gammasAt;
             }
-            else if (round > 0)
+            else
             {
                 high = _gammasAt;
             }
@@ -126,7 +132,7 @@ internal ref struct LadderBalance
             lastAt = _gammasAt;
             lastMiss = miss;
             change = UseGammasAt(next);
-            if (change == 0)
+            if (change == 0 && next == IonicStrength)
             {
                 return true;
             }
@@ -139,7 +145,8 @@ internal ref struct LadderBalance
             if (!double.IsInfinity(high) && high - low <= 4e-16 * high)
             {
                 Speciate(activity);
-                return true;
+                _gammaNoise += change;
+                return Math.Abs(IonicStrength - _gammasAt) <= 1e-13 * IonicStrength;
             }
         }
 
@@ -150,7 +157,7 @@ internal ref struct LadderBalance
     private readonly double Next(int round, double low, double high, double miss, double lastAt, double lastMiss)
     {
         var next = IonicStrength;
-        if (round > 1 && miss != lastMiss)
+        if (round > 0 && miss != lastMiss)
         {
             var secant = _gammasAt - (miss * (_gammasAt - lastAt) / (miss - lastMiss));
             next = secant > 0.1 * next && secant < 10 * next ? secant : next;
@@ -172,6 +179,12 @@ internal ref struct LadderBalance
     private double UseGammasAt(double ionicStrength)
     {
         _model.Log10Gammas(_equilibrium, ionicStrength, _molalities, _nextLog10Gammas);
+        _gammasAt = ionicStrength;
+        if (_nextLog10Gammas.SequenceEqual(_log10Gammas))
+        {
+            return 0;
+        }
+
         double change = 0, largest = 0;
         for (var i = 0; i < _log10Gammas.Length; i++)
         {
@@ -179,13 +192,7 @@ internal ref struct LadderBalance
             largest = Math.Max(largest, Math.Abs(_nextLog10Gammas[i]));
         }
 
-        _gammasAt = ionicStrength;
-        _gammaNoise = (8 * HalfLastDigit * largest) + change;
-        if (change == 0)
-        {
-            return 0;
-        }
-
+        _gammaNoise = 8 * HalfLastDigit * largest;
         GammasMove = true;
         _nextLog10Gammas.CopyTo(_log10Gammas);
         _inverseGammaH = Math.Pow(10, -_log10Gammas[Equilibrium.HydrogenIon]);
