@@ -21,6 +21,7 @@ internal sealed class RecipeDraft
     private int _positions;
 
     private readonly List<Stock> _stocks = [];
+    private readonly Dictionary<string, Stock> _stocksByName = new(StringComparer.Ordinal);
     private Measure? _temperature;
     private Measure? _preparedAt;
     private Measure? _makeUpTo;
@@ -70,10 +71,10 @@ internal sealed class RecipeDraft
             return;
         }
 
-        var same = _stocks.Find(one => string.Equals(one.Name, stock.Name, StringComparison.Ordinal));
-        if (same is null)
+        if (!_stocksByName.TryGetValue(stock.Name, out var same))
         {
             _stocks.Add(stock);
+            _stocksByName.Add(stock.Name, stock);
         }
         else if (!same.Equals(stock))
         {
@@ -139,7 +140,7 @@ internal sealed class RecipeDraft
 
         CheckIds();
         var resolver = new SubstanceResolver(table, Faults);
-        var stocks = _stocks.Select(stock => resolver.Resolve(stock, "$.stocks." + stock.Name)).ToArray();
+        var stocks = _stocks.Select(stock => resolver.Resolve(stock, "$.stocks" + PathStep.Of(stock.Name!))).ToArray();
         var parts = _parts.Select((part, index) => resolver.Resolve(part, PathOf(_positionOf[index]))).ToArray();
         if (Faults.Any)
         {

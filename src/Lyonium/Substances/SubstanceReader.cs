@@ -31,7 +31,7 @@ internal sealed class SubstanceReader
         var properties = place.Properties(
             "id", "name", "synonyms", "formula", "otherFormulas", "brings", "protons", "density", "molarVolume", "solutionDensities", "groups");
         var id = TableId.Read(place, properties);
-        var name = place.Need(properties, "name")?.Text();
+        var name = TableText.Read(place, properties, "name");
         var synonyms = Texts(properties, "synonyms");
         var formulaPlace = place.Need(properties, "formula");
         var formula = ReadFormula(formulaPlace);
@@ -126,7 +126,11 @@ internal sealed class SubstanceReader
                 continue;
             }
 
-            if (_owners.TryGetValue(folded, out var owner))
+            if (folded.Length == 0)
+            {
+                place.Faults.Add(FaultKinds.TableBadValue, place.Path, one, ("detail", "a name has letters"));
+            }
+            else if (_owners.TryGetValue(folded, out var owner))
             {
                 place.Faults.Add(FaultKinds.TableDuplicate, place.Path, one, ("owner", owner));
             }

@@ -1,7 +1,6 @@
 using System;
 using System.Collections.Generic;
 using System.IO;
-using System.Linq;
 using Lyonium.Documents;
 using Lyonium.Faults;
 using Lyonium.Provenance;
@@ -32,9 +31,9 @@ internal static class SubstanceTableReader
         }
 
         var properties = root.Properties("format", "edition", "sources", "elements", "families", "substances");
-        var edition = root.Need(properties, "edition")?.Text();
+        var edition = TableText.Read(root, properties, "edition");
         var values = new SourcedValueReader(ReadSources(root.Need(properties, "sources"), faults));
-        var weights = Items(root.Need(properties, "elements")).Select(place => ReadElement(place, values)).OfType<AtomicWeight>().ToArray();
+        var weights = ReadElements(root.Need(properties, "elements"), values);
         var families = new FamilyReader(values).Read(root.Need(properties, "families"));
         var substances = new SubstanceReader(values, families, weights).Read(root.Need(properties, "substances"));
         return faults.Any || edition is null
@@ -52,7 +51,7 @@ internal static class SubstanceTableReader
         foreach (var place in Items(list))
         {
             var properties = place.Properties("key", "citation");
-            if (place.Need(properties, "key")?.Text() is not { } key || place.Need(properties, "citation")?.Text() is not { } citation)
+            if (TableText.Read(place, properties, "key") is not { } key || TableText.Read(place, properties, "citation") is not { } citation)
             {
                 continue;
             }
@@ -60,10 +59,6 @@ internal static class SubstanceTableReader
             if (!keys.Add(key))
             {
                 faults.Add(FaultKinds.TableDuplicate, place.Path + ".key", key, ("owner", "another source"));
-            }
-            else if (citation.Trim().Length == 0)
-            {
-                faults.Add(FaultKinds.TableBadValue, place.Path + ".citation", citation, ("detail", "a source needs its citation"));
             }
             else
             {
@@ -74,10 +69,34 @@ internal static class SubstanceTableReader
         return sources;
     }
 
+    private static AtomicWeight[] ReadElements(JsonPlace? list, SourcedValueReader values)
+    {
+        var weights = new List<AtomicWeight>();
+        var symbols = new HashSet<string>(StringComparer.Ordinal);
+        foreach (var place in Items(list))
+        {
+            if (ReadElement(place, values) is not { } element)
+            {
+                continue;
+            }
+
+            if (symbols.Add(element.Symbol))
+            {
+                weights.Add(element);
+            }
+            else
+            {
+                place.Faults.Add(FaultKinds.TableDuplicate, place.Path + ".symbol", element.Symbol, ("owner", "another element"));
+            }
+        }
+
+        return weights.ToArray();
+    }
+
     private static AtomicWeight? ReadElement(JsonPlace place, SourcedValueReader values)
     {
         var properties = place.Properties("symbol", "weight", "uncertainty", "source", "known", "note");
-        var symbol = place.Need(properties, "symbol")?.Text();
+        var symbol = TableText.Read(place, properties, "symbol");
         var weight = values.Finish(place, properties, place.Need(properties, "weight"), "uncertainty");
         if (weight is { Value: <= 0 })
         {
