@@ -1,3 +1,4 @@
+using System;
 using System.Collections.Generic;
 using System.Linq;
 using Lyonium.Faults;
@@ -8,7 +9,10 @@ using Lyonium.Water;
 namespace Lyonium.Recipes;
 
 /// <summary>Turns a recipe into a mixture: adds up what each part brings, and fills up to the mark.</summary>
-internal sealed class Preparation(Recipe recipe, SubstanceTable table)
+/// <param name="recipe">The recipe.</param>
+/// <param name="table">A table that has its substances.</param>
+/// <param name="pathOf">Where a part of the recipe stands in the input; its own place where it is left out.</param>
+internal sealed class Preparation(Recipe recipe, SubstanceTable table, Func<int, string>? pathOf = null)
 {
     private const double MostKg = 1e9;
     private const double MostMol = 1e9;
@@ -19,15 +23,7 @@ internal sealed class Preparation(Recipe recipe, SubstanceTable table)
 
     public Attempt<Mixture> Run()
     {
-        var parts = new List<PreparedPart>(recipe.Parts.Count);
-        for (var i = 0; i < recipe.Parts.Count; i++)
-        {
-            if (Prepare(recipe.Parts[i], RecipeDraft.PathOf(i)) is { } prepared)
-            {
-                parts.Add(prepared);
-            }
-        }
-
+        var parts = PrepareParts();
         if (_faults.Any)
         {
             return _faults.Attempt<Mixture>(null);
@@ -51,6 +47,27 @@ internal sealed class Preparation(Recipe recipe, SubstanceTable table)
         return _faults.Any
             ? _faults.Attempt<Mixture>(null)
             : new Attempt<Mixture>(new Mixture(recipe, table, parts.ToArray(), water, volume, mass, estimated));
+    }
+
+    /// <summary>What is wrong with the parts one by one, where the recipe as a whole is refused already.</summary>
+    public IReadOnlyList<Fault> FaultsOfParts()
+    {
+        PrepareParts();
+        return _faults.ToList();
+    }
+
+    private List<PreparedPart> PrepareParts()
+    {
+        var parts = new List<PreparedPart>(recipe.Parts.Count);
+        for (var i = 0; i < recipe.Parts.Count; i++)
+        {
+            if (Prepare(recipe.Parts[i], pathOf is null ? RecipeDraft.PathOf(i) : pathOf(i)) is { } prepared)
+            {
+                parts.Add(prepared);
+            }
+        }
+
+        return parts;
     }
 
     private PreparedPart? Prepare(Part part, string path)

@@ -144,13 +144,27 @@ internal sealed class RecipeDraft
         var parts = _parts.Select((part, index) => resolver.Resolve(part, PathOf(_positionOf[index]))).ToArray();
         if (Faults.Any)
         {
+            // The parts that stand tell their own faults too, so that all are told at once.
+            var sound = Enumerable.Range(0, parts.Length).Where(index => IsResolved(parts[index], table)).ToArray();
+            var soundParts = Array.AsReadOnly(sound.Select(index => parts[index]).ToArray());
+            Faults.AddRange(new Preparation(Product(stocks, soundParts), table, index => PathOf(_positionOf[sound[index]])).FaultsOfParts());
             return Faults.Attempt<Recipe>(null);
         }
 
-        var recipe = new Recipe(Id, Name, _temperature, _preparedAt, Array.AsReadOnly(stocks), Array.AsReadOnly(parts), _makeUpTo, Notes);
+        var recipe = Product(stocks, Array.AsReadOnly(parts));
         Faults.AddRange(Mixture.TryPrepare(recipe, table).Faults);
         return Faults.Attempt(recipe);
     }
+
+    private static bool IsResolved(Part part, SubstanceTable table) => part switch
+    {
+        SolutionPart solution => table.ById(solution.Stock.Substance) is not null,
+        SubstancePart pure => table.ById(pure.Substance) is not null,
+        _ => true,
+    };
+
+    private Recipe Product(Stock[] stocks, IReadOnlyList<Part> parts) =>
+        new(Id, Name, _temperature, _preparedAt, Array.AsReadOnly(stocks), parts, _makeUpTo, Notes);
 
     private void AddPart(Part part)
     {

@@ -73,6 +73,15 @@ public sealed class HostileJsonTests
         Assert.Equal("LYO0201", Assert.Single(RecipeText.Try([0x7B, 0x22, 0xFF, 0x22, 0x3A, 0x31, 0x7D]).Faults).Code);
     }
 
+    [Fact]
+    public void TryRead_bytesThatAreNoUtf8InTheNotes_areRefused()
+    {
+        var text = Encoding.UTF8.GetBytes(RecipeText.With(Water, "\"notes\": { \"a\": \"#\" }"));
+        text[Array.IndexOf(text, (byte)'#')] = 0xFF;
+
+        Assert.Equal("LYO0201", Assert.Single(RecipeText.Try(text).Faults).Code);
+    }
+
     [Theory]
     [InlineData("[")]
     [InlineData("{\"a\":")]
