@@ -1,30 +1,31 @@
 using System;
-using System.Diagnostics;
 using System.Linq;
 using System.Text;
 using Lyonium.Predictions;
 using Lyonium.Recipes;
 using Lyonium.Records;
 using Lyonium.Substances;
+using UnitsNet;
 using Xunit;
 
 namespace Lyonium.Tests.Records;
 
 /// <summary>What a client sends to make the reader slow: it is read or refused, in bounded time and with few faults.</summary>
+[Collection(Timing.Alone)]
 public sealed class LimitsTests
 {
     private const string Water = "{\"substance\":\"water\",\"mass\":\"1 g\"}";
 
+    public LimitsTests() => _ = SubstanceTable.Default;
+
     [Fact]
     public void TryRead_aMillionParts_isRefusedInUnderASecond()
     {
-        _ = SubstanceTable.Default;
         var text = "{\"format\":\"lyonium-recipe/1\",\"parts\":[" + string.Join(',', Enumerable.Repeat("{}", 1_000_000)) + "]}";
-        var watch = Stopwatch.StartNew();
+
+        Timing.Within(TimeSpan.FromSeconds(1), () => RecipeText.Try(text));
 
         var fault = Assert.Single(RecipeText.Try(text).Faults);
-
-        Assert.True(watch.Elapsed < TimeSpan.FromSeconds(1), $"{watch.Elapsed}");
         Assert.Equal("LYO0410 $.parts", fault.Code + " " + fault.Path);
         Assert.Contains("1000000", fault.Message, StringComparison.Ordinal);
         Assert.Contains("10000", fault.Message, StringComparison.Ordinal);
@@ -32,20 +33,17 @@ public sealed class LimitsTests
     }
 
     [Fact]
-    public void Build_aMillionParts_isRefused()
+    public void Build_aHundredThousandParts_isRefusedInUnderASecond()
     {
-        _ = SubstanceTable.Default;
         var builder = Recipe.Named("too many");
-        for (var i = 0; i < 1_000_000; i++)
+        for (var i = 0; i < 100_000; i++)
         {
-            builder.PourWater("1 mL");
+            builder.PourWater(Volume.FromLiters(1));
         }
 
-        var watch = Stopwatch.StartNew();
-        var fault = Assert.Single(builder.TryBuild(SubstanceTable.Default).Faults);
+        Timing.Within(TimeSpan.FromSeconds(1), () => Assert.False(builder.TryBuild(SubstanceTable.Default).Success));
 
-        Assert.Equal("LYO0410 $.parts", fault.Code + " " + fault.Path);
-        Assert.True(watch.Elapsed < TimeSpan.FromSeconds(1), $"{watch.Elapsed}");
+        Assert.All(builder.TryBuild(SubstanceTable.Default).Faults, fault => Assert.Equal("LYO0410 $.parts", fault.Code + " " + fault.Path));
     }
 
     [Fact]
@@ -89,35 +87,38 @@ public sealed class LimitsTests
     public void TryRead_manyStocks_isReadInTime()
     {
         var stocks = string.Join(',', Enumerable.Range(0, 60_000).Select(i => $"\"s{i}\":{{\"substance\":\"HCl\",\"molality\":\"1 mol/kg\"}}"));
-        var watch = Stopwatch.StartNew();
 
-        Assert.True(RecipeText.Try("{\"format\":\"lyonium-recipe/1\",\"stocks\":{" + stocks + "},\"parts\":[" + Water + "]}").Success);
-        Assert.True(watch.Elapsed < TimeSpan.FromSeconds(3), $"{watch.Elapsed}");
+        Timing.Within(
+            TimeSpan.FromSeconds(3),
+            () => Assert.True(RecipeText.Try("{\"format\":\"lyonium-recipe/1\",\"stocks\":{" + stocks + "},\"parts\":[" + Water + "]}").Success));
     }
 
     [Fact]
-    public void TryRead_manyPropertiesOrDeepNames_isRefusedInTime()
-    {
+    public void TryRead_manyUnknownProperties_isRefusedInTime() =>
         Within(2, "{\"format\":\"lyonium-recipe/1\"," + string.Join(',', Enumerable.Range(0, 300_000).Select(i => $"\"{i}\":0")) + "}");
-        Within(2, "{\"format\":\"lyonium-recipe/1\",\"parts\":[{\"" + new string('n', 3_000_000) + "\":1}]}");
-        Within(2, "{\"format\":\"lyonium-recipe/1\",\"parts\":[{\"substance\":\"" + new string('n', 3_000_000) + "\",\"mass\":\"1 g\"}]}");
-        Within(2, "{\"format\":\"lyonium-recipe/1\",\"parts\":[{\"substance\":\"water\",\"mass\":\"" + new string('9', 3_000_000) + " g\"}]}");
-        Within(2, "{\"format\":\"lyonium-recipe/1\",\"parts\":[{\"substance\":\"water\",\"mass\":{\"value\":" + new string('9', 3_000_000) + ",\"unit\":\"g\"}}]}");
-        Within(2, "{\"format\":\"lyonium-recipe/1\",\"parts\":[{\"substance\":\"water\",\"mass\":{\"value\":1,\"unit\":\"" + new string('g', 3_000_000) + "\"}}]}");
-    }
+
+    [Theory]
+    [InlineData("{\"#\":1}")]
+    [InlineData("{\"substance\":\"#\",\"mass\":\"1 g\"}")]
+    [InlineData("{\"substance\":\"water\",\"mass\":\"#\"}")]
+    [InlineData("{\"substance\":\"water\",\"mass\":\"# g\"}")]
+    [InlineData("{\"substance\":\"water\",\"mass\":\"0.# g\"}")]
+    [InlineData("{\"substance\":\"water\",\"mass\":{\"value\":#,\"unit\":\"g\"}}")]
+    [InlineData("{\"substance\":\"water\",\"mass\":{\"value\":1,\"unit\":\"#\"}}")]
+    [InlineData("{\"stock\":\"#\",\"mass\":\"1 g\"}")]
+    public void TryRead_aTextOfMegabytes_isToldInTime(string part) =>
+        Within(2, RecipeText.With(part.Replace("#", new string('9', 3_000_000), StringComparison.Ordinal) + ",{}"));
 
     private static void Within(double seconds, string text)
     {
-        _ = SubstanceTable.Default;
         var bytes = Encoding.UTF8.GetBytes(text);
         Assert.True(bytes.Length <= RecipeJson.MostBytes, "the text is refused for its size alone");
-        var watch = Stopwatch.StartNew();
-        var attempt = RecipeText.Try(bytes);
-        watch.Stop();
 
+        Timing.Within(TimeSpan.FromSeconds(seconds), () => RecipeText.Try(bytes));
+
+        var attempt = RecipeText.Try(bytes);
         Assert.False(attempt.Success);
         FaultText.Check(attempt.Faults);
         Assert.InRange(attempt.Faults.Sum(one => one.ToString().Length), 1, 200_000);
-        Assert.True(watch.Elapsed < TimeSpan.FromSeconds(seconds), $"{watch.Elapsed}");
     }
 }
