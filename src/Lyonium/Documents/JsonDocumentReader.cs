@@ -11,6 +11,8 @@ internal static class JsonDocumentReader
 {
     private const int DeepestNesting = 64;
 
+    private static readonly UTF8Encoding StrictUtf8 = new(encoderShouldEmitUTF8Identifier: false, throwOnInvalidBytes: true);
+
     /// <summary>Opens a document from text.</summary>
     /// <returns>The root, or <see langword="null"/> with the fault told.</returns>
     public static JsonPlace? Open(string text, int mostBytes, FaultList faults)
@@ -47,6 +49,12 @@ internal static class JsonDocumentReader
 
     private static JsonPlace? Open(byte[] bytes, FaultList faults)
     {
+        if (!IsUtf8(bytes))
+        {
+            faults.Add(FaultKinds.NotJson, "$", "", ("detail", "it is not UTF-8."), ("line", "1"), ("position", "1"));
+            return null;
+        }
+
         var start = bytes.Length >= 3 && bytes[0] == 0xEF && bytes[1] == 0xBB && bytes[2] == 0xBF ? 3 : 0;
         try
         {
@@ -66,6 +74,20 @@ internal static class JsonDocumentReader
                 ("line", line.ToString(System.Globalization.CultureInfo.InvariantCulture)),
                 ("position", position.ToString(System.Globalization.CultureInfo.InvariantCulture)));
             return null;
+        }
+    }
+
+    // The parser does not look into texts that nobody reads, and notes are echoed as they stand.
+    private static bool IsUtf8(byte[] bytes)
+    {
+        try
+        {
+            _ = StrictUtf8.GetCharCount(bytes);
+            return true;
+        }
+        catch (DecoderFallbackException)
+        {
+            return false;
         }
     }
 

@@ -31,6 +31,9 @@ internal sealed class JsonPlace
     /// <summary>The value as it is written.</summary>
     public string RawText => _element.GetRawText();
 
+    /// <summary>An object as it is written, whatever stands in it.</summary>
+    public string? RawObject() => Is(JsonValueKind.Object, "an object") ? RawText : null;
+
     /// <summary>The properties of an object; each one that is not known, or stands twice, is told.</summary>
     public IReadOnlyDictionary<string, JsonPlace> Properties(params string[] known)
     {
@@ -42,18 +45,24 @@ internal sealed class JsonPlace
 
         foreach (var property in _element.EnumerateObject())
         {
-            var path = Path + Step(property.Name);
-            if (known.Length > 0 && !known.Contains(property.Name, StringComparer.Ordinal))
+            if (NameOf(property) is not { } name)
             {
-                _faults.Add(FaultKinds.UnknownProperty, path, property.Name, ("known", string.Join(", ", known)));
+                _faults.Add(FaultKinds.WrongType, Path, "", ("expected", "property names in Unicode"), ("actual", "half a surrogate pair in one"));
+                continue;
             }
-            else if (properties.ContainsKey(property.Name))
+
+            var path = Path + PathStep.Of(name);
+            if (known.Length > 0 && !known.Contains(name, StringComparer.Ordinal))
             {
-                _faults.Add(FaultKinds.DuplicateProperty, path, property.Name);
+                _faults.Add(FaultKinds.UnknownProperty, path, name, ("known", string.Join(", ", known)));
+            }
+            else if (properties.ContainsKey(name))
+            {
+                _faults.Add(FaultKinds.DuplicateProperty, path, name);
             }
             else
             {
-                properties.Add(property.Name, new JsonPlace(property.Value, path, _faults));
+                properties.Add(name, new JsonPlace(property.Value, path, _faults));
             }
         }
 
@@ -62,7 +71,7 @@ internal sealed class JsonPlace
 
     /// <summary>One property of an object, whatever else stands in it; <see langword="null"/> where it is not there.</summary>
     public JsonPlace? Find(string name) =>
-        IsObject && _element.TryGetProperty(name, out var value) ? new JsonPlace(value, Path + Step(name), _faults) : null;
+        Member(name) is { } value ? new JsonPlace(value, Path + PathStep.Of(name), _faults) : null;
 
     /// <summary>The items of an array.</summary>
     public IReadOnlyList<JsonPlace> Items()
@@ -156,12 +165,10 @@ internal sealed class JsonPlace
     {
         if (IsText)
         {
-            return TextValue() is { } text ? MeasureReader.DimensionOf(text) : null;
+            return TextOf(_element) is { } text ? MeasureReader.DimensionOf(text) : null;
         }
 
-        return IsObject && _element.TryGetProperty("unit", out var unit) && unit.ValueKind == JsonValueKind.String
-            ? MeasureReader.DimensionOf(unit.GetString()!)
-            : null;
+        return Member("unit") is { ValueKind: JsonValueKind.String } unit && TextOf(unit) is { } code ? MeasureReader.DimensionOf(code) : null;
     }
 
     /// <summary>A property that must be there.</summary>
@@ -180,16 +187,54 @@ internal sealed class JsonPlace
         return null;
     }
 
-    // Half a surrogate pair is legal JSON and no text.
     private string? TextValue()
+    {
+        var text = TextOf(_element);
+        if (text is null)
+        {
+            _faults.Add(FaultKinds.WrongType, Path, RawText, ("expected", "a text in Unicode"), ("actual", "half a surrogate pair"));
+        }
+
+        return text;
+    }
+
+    private JsonElement? Member(string name)
+    {
+        if (!IsObject)
+        {
+            return null;
+        }
+
+        JsonElement? found = null;
+        foreach (var property in _element.EnumerateObject().Where(property => NameOf(property) == name))
+        {
+            found = property.Value;
+        }
+
+        return found;
+    }
+
+    // Half a surrogate pair is legal JSON and no text; it can stand in a property name as well.
+    private static string? TextOf(JsonElement element)
     {
         try
         {
-            return _element.GetString();
+            return element.GetString();
         }
         catch (InvalidOperationException)
         {
-            _faults.Add(FaultKinds.WrongType, Path, RawText, ("expected", "a text in Unicode"), ("actual", "half a surrogate pair"));
+            return null;
+        }
+    }
+
+    private static string? NameOf(JsonProperty property)
+    {
+        try
+        {
+            return property.Name;
+        }
+        catch (InvalidOperationException)
+        {
             return null;
         }
     }
@@ -213,9 +258,4 @@ internal sealed class JsonPlace
         _faults.Add(FaultKinds.WrongType, Path, _element.GetRawText(), ("expected", expected), ("actual", actual));
         return false;
     }
-
-    private static string Step(string name) =>
-        name.Length > 0 && name.All(c => c is (>= 'a' and <= 'z') or (>= 'A' and <= 'Z') or (>= '0' and <= '9') or '_')
-            ? "." + name
-            : "['" + (name.Length > 60 ? name.Substring(0, 60) + "…" : name).Replace("'", "\\'") + "']";
 }

@@ -14,12 +14,15 @@ internal sealed class FaultList
 
     public int Count => _faults.Count;
 
+    /// <summary>Whether no further fault is kept, so that none need be worded at length.</summary>
+    public bool IsFull => _faults.Count >= Most;
+
     public void Add(FaultKind kind, string path, string found, params (string Name, string Value)[] arguments) =>
         Add(Fault.Of(kind, path, found, arguments));
 
     public void Add(Fault fault)
     {
-        if (_faults.Count < Most)
+        if (!IsFull)
         {
             _faults.Add(fault);
         }

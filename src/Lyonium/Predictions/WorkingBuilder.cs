@@ -71,9 +71,9 @@ internal sealed class WorkingBuilder(SolvedMixture answer)
 
         var start = new double[equilibrium.SpeciesCount];
         var standing = Standing(equilibrium, levels);
-        foreach (var (component, index) in standing)
+        foreach (var one in standing)
         {
-            start[index] = equilibrium.Constraints[component].Value;
+            start[one.Value] = equilibrium.Constraints[one.Key].Value;
         }
 
         if (levels.SharedLevel is { } shared)

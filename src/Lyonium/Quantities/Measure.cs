@@ -13,10 +13,11 @@ public sealed class Measure : IEquatable<Measure>
 
     internal Measure(double value, UcumUnit unit, double? standardUncertainty = null)
     {
-        Value = value;
+        // Minus zero is zero, and is not written with a sign.
+        Value = value == 0 ? 0 : value;
         _unit = unit;
         StandardUncertainty = standardUncertainty;
-        Computed = unit.ToComputed(value);
+        Computed = unit.ToComputed(Value);
     }
 
     /// <summary>The number, in <see cref="Unit"/>.</summary>

@@ -1,3 +1,4 @@
+using System;
 using UnitsNet;
 using UnitsNet.Units;
 
@@ -14,7 +15,7 @@ internal static class UnitsNetDoor
         VolumeUnit.Liter => Of(volume.Value, "L"),
         VolumeUnit.Milliliter => Of(volume.Value, "mL"),
         VolumeUnit.Microliter => Of(volume.Value, "uL"),
-        _ => Of(volume.Liters, "L"),
+        _ => Of(Converted(() => volume.Liters), "L"),
     };
 
     public static Measure From(Mass mass) => mass.Unit switch
@@ -23,14 +24,14 @@ internal static class UnitsNetDoor
         MassUnit.Gram => Of(mass.Value, "g"),
         MassUnit.Milligram => Of(mass.Value, "mg"),
         MassUnit.Microgram => Of(mass.Value, "ug"),
-        _ => Of(mass.Kilograms, "kg"),
+        _ => Of(Converted(() => mass.Kilograms), "kg"),
     };
 
     public static Measure From(AmountOfSubstance amount) => amount.Unit switch
     {
         AmountOfSubstanceUnit.Mole => Of(amount.Value, "mol"),
         AmountOfSubstanceUnit.Millimole => Of(amount.Value, "mmol"),
-        _ => Of(amount.Moles, "mol"),
+        _ => Of(Converted(() => amount.Moles), "mol"),
     };
 
     public static Measure From(Molarity concentration) => concentration.Unit switch
@@ -38,19 +39,19 @@ internal static class UnitsNetDoor
         MolarityUnit.MolePerLiter => Of(concentration.Value, "mol/L"),
         MolarityUnit.MillimolePerLiter => Of(concentration.Value, "mmol/L"),
         MolarityUnit.MicromolePerLiter => Of(concentration.Value, "umol/L"),
-        _ => Of(concentration.MolesPerLiter, "mol/L"),
+        _ => Of(Converted(() => concentration.MolesPerLiter), "mol/L"),
     };
 
     public static Measure From(Molality molality) => molality.Unit switch
     {
         MolalityUnit.MolePerKilogram => Of(molality.Value, "mol/kg"),
-        _ => Of(molality.MolesPerKilogram, "mol/kg"),
+        _ => Of(Converted(() => molality.MolesPerKilogram), "mol/kg"),
     };
 
     public static Measure From(MassFraction fraction) => fraction.Unit switch
     {
         MassFractionUnit.Percent => Of(fraction.Value, "%"),
-        _ => Of(fraction.Percent, "%"),
+        _ => Of(Converted(() => fraction.Percent), "%"),
     };
 
     public static Measure From(Density density) => density.Unit switch
@@ -58,15 +59,28 @@ internal static class UnitsNetDoor
         DensityUnit.GramPerMilliliter => Of(density.Value, "g/mL"),
         DensityUnit.KilogramPerLiter => Of(density.Value, "kg/L"),
         DensityUnit.GramPerLiter => Of(density.Value, "g/L"),
-        _ => Of(density.KilogramsPerLiter, "kg/L"),
+        _ => Of(Converted(() => density.KilogramsPerLiter), "kg/L"),
     };
 
     public static Measure From(Temperature temperature) => temperature.Unit switch
     {
         TemperatureUnit.DegreeCelsius => Of(temperature.Value, "Cel"),
         TemperatureUnit.Kelvin => Of(temperature.Value, "K"),
-        _ => Of(temperature.Kelvins, "K"),
+        _ => Of(Converted(() => temperature.Kelvins), "K"),
     };
+
+    // UnitsNet throws where a conversion overflows; here that is a number that is not finite, and is told as such.
+    private static double Converted(Func<double> conversion)
+    {
+        try
+        {
+            return conversion();
+        }
+        catch (ArgumentException)
+        {
+            return double.PositiveInfinity;
+        }
+    }
 
     private static Measure Of(double value, string code) => new(value, UcumUnit.Find(code)!);
 }

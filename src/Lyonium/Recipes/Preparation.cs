@@ -9,7 +9,11 @@ using Lyonium.Water;
 namespace Lyonium.Recipes;
 
 /// <summary>Turns a recipe into a mixture: adds up what each part brings, and fills up to the mark.</summary>
-internal sealed class Preparation(Recipe recipe, SubstanceTable table, string root)
+/// <param name="recipe">The recipe.</param>
+/// <param name="table">A table that has its substances.</param>
+/// <param name="root">Where the recipe stands: <c>$</c>, or the place of a recipe inside another.</param>
+/// <param name="pathOf">Where a part of the recipe stands in the input; its own place where it is left out.</param>
+internal sealed class Preparation(Recipe recipe, SubstanceTable table, string root, Func<int, string>? pathOf = null)
 {
     private const double MostKg = 1e9;
     private const double MostMol = 1e9;
@@ -20,20 +24,7 @@ internal sealed class Preparation(Recipe recipe, SubstanceTable table, string ro
 
     public Attempt<Mixture> Run()
     {
-        var parts = new List<PreparedPart>(recipe.Parts.Count);
-        for (var i = 0; i < recipe.Parts.Count; i++)
-        {
-            var path = RecipeDraft.PathOf(root, i);
-            if (recipe.Parts[i] is RecipePart inner)
-            {
-                parts.AddRange(PrepareRecipe(inner, path));
-            }
-            else if (Prepare(recipe.Parts[i], path) is { } prepared)
-            {
-                parts.Add(prepared);
-            }
-        }
-
+        var parts = PrepareParts();
         if (_faults.Any)
         {
             return _faults.Attempt<Mixture>(null);
@@ -58,6 +49,32 @@ internal sealed class Preparation(Recipe recipe, SubstanceTable table, string ro
         return _faults.Any
             ? _faults.Attempt<Mixture>(null)
             : new Attempt<Mixture>(new Mixture(recipe, table, parts.ToArray(), water, volume, mass, estimated));
+    }
+
+    /// <summary>What is wrong with the parts one by one, where the recipe as a whole is refused already.</summary>
+    public IReadOnlyList<Fault> FaultsOfParts()
+    {
+        PrepareParts();
+        return _faults.ToList();
+    }
+
+    private List<PreparedPart> PrepareParts()
+    {
+        var parts = new List<PreparedPart>(recipe.Parts.Count);
+        for (var i = 0; i < recipe.Parts.Count; i++)
+        {
+            var path = pathOf is null ? RecipeDraft.PathOf(root, i) : pathOf(i);
+            if (recipe.Parts[i] is RecipePart inner)
+            {
+                parts.AddRange(PrepareRecipe(inner, path));
+            }
+            else if (Prepare(recipe.Parts[i], path) is { } prepared)
+            {
+                parts.Add(prepared);
+            }
+        }
+
+        return parts;
     }
 
     private PreparedPart? Prepare(Part part, string path)

@@ -21,6 +21,7 @@ internal sealed class RecipeDraft
     private int _positions;
 
     private readonly List<Stock> _stocks = [];
+    private readonly Dictionary<string, Stock> _stocksByName = new(StringComparer.Ordinal);
     private Measure? _temperature;
     private Measure? _preparedAt;
     private Measure? _makeUpTo;
@@ -79,10 +80,10 @@ internal sealed class RecipeDraft
             return;
         }
 
-        var same = _stocks.Find(one => string.Equals(one.Name, stock.Name, StringComparison.Ordinal));
-        if (same is null)
+        if (!_stocksByName.TryGetValue(stock.Name, out var same))
         {
             _stocks.Add(stock);
+            _stocksByName.Add(stock.Name, stock);
         }
         else if (!same.Equals(stock))
         {
@@ -159,17 +160,31 @@ internal sealed class RecipeDraft
 
         CheckIds();
         var resolver = new SubstanceResolver(table, Faults);
-        var stocks = _stocks.Select(stock => resolver.Resolve(stock, _root + ".stocks." + stock.Name)).ToArray();
+        var stocks = _stocks.Select(stock => resolver.Resolve(stock, _root + ".stocks" + PathStep.Of(stock.Name!))).ToArray();
         var parts = _parts.Select((part, index) => resolver.Resolve(part, PathOf(_root, _positionOf[index]))).ToArray();
         if (Faults.Any)
         {
+            // The parts that stand tell their own faults too, so that all are told at once.
+            var sound = Enumerable.Range(0, parts.Length).Where(index => IsResolved(parts[index], table)).ToArray();
+            var soundParts = Array.AsReadOnly(sound.Select(index => parts[index]).ToArray());
+            Faults.AddRange(new Preparation(Product(stocks, soundParts), table, _root, index => PathOf(_root, _positionOf[sound[index]])).FaultsOfParts());
             return Faults.Attempt<Recipe>(null);
         }
 
-        var recipe = new Recipe(Id, Name, _temperature, _preparedAt, Array.AsReadOnly(stocks), Array.AsReadOnly(parts), _makeUpTo, Notes);
+        var recipe = Product(stocks, Array.AsReadOnly(parts));
         Faults.AddRange(Mixture.TryPrepare(recipe, table, _root).Faults);
         return Faults.Attempt(recipe);
     }
+
+    private static bool IsResolved(Part part, SubstanceTable table) => part switch
+    {
+        SolutionPart solution => table.ById(solution.Stock.Substance) is not null,
+        SubstancePart pure => table.ById(pure.Substance) is not null,
+        _ => true,
+    };
+
+    private Recipe Product(Stock[] stocks, IReadOnlyList<Part> parts) =>
+        new(Id, Name, _temperature, _preparedAt, Array.AsReadOnly(stocks), parts, _makeUpTo, Notes);
 
     private void AddPart(Part part)
     {

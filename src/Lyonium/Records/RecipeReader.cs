@@ -15,6 +15,7 @@ internal sealed class RecipeReader(JsonPlace root, SubstanceTable table, FaultLi
 {
     private readonly RecipeDraft _draft = new(faults, root.Path);
     private readonly Dictionary<string, Stock?> _stocks = new(StringComparer.Ordinal);
+    private string? _knownStocks;
 
     public Attempt<Recipe> Read() => faults.Attempt(ReadInner());
 
@@ -22,9 +23,9 @@ internal sealed class RecipeReader(JsonPlace root, SubstanceTable table, FaultLi
     private Recipe? ReadInner()
     {
         var properties = root.Properties("format", "id", "name", "temperature", "preparedAt", "stocks", "parts", "makeUpTo", "notes");
-        _draft.Id = Optional(properties, "id")?.Text();
+        _draft.Id = Id(properties);
         _draft.Name = Optional(properties, "name")?.Text();
-        _draft.Notes = Optional(properties, "notes")?.RawText;
+        _draft.Notes = Optional(properties, "notes")?.RawObject();
         _draft.SetTemperature(Optional(properties, "temperature")?.Measure(Dimension.Temperature));
         _draft.SetPreparedAt(Optional(properties, "preparedAt")?.Measure(Dimension.Temperature));
         ReadStocks(Optional(properties, "stocks"));
@@ -45,6 +46,21 @@ internal sealed class RecipeReader(JsonPlace root, SubstanceTable table, FaultLi
     private static JsonPlace? Optional(IReadOnlyDictionary<string, JsonPlace> properties, string name) =>
         properties.TryGetValue(name, out var place) ? place : null;
 
+    private string? Id(IReadOnlyDictionary<string, JsonPlace> properties)
+    {
+        if (Optional(properties, "id") is not { } place || place.Text() is not { } id)
+        {
+            return null;
+        }
+
+        if (id.Length == 0)
+        {
+            faults.Add(FaultKinds.Incomplete, place.Path, id, ("missing", "an id of one or more characters"));
+        }
+
+        return id;
+    }
+
     private void ReadStocks(JsonPlace? list)
     {
         if (list is null)
@@ -54,6 +70,11 @@ internal sealed class RecipeReader(JsonPlace root, SubstanceTable table, FaultLi
 
         foreach (var entry in list.Properties())
         {
+            if (string.IsNullOrWhiteSpace(entry.Key))
+            {
+                faults.Add(FaultKinds.Incomplete, entry.Value.Path, entry.Key, ("missing", "a name for the stock"));
+            }
+
             var properties = entry.Value.Properties("substance", "concentration", "molality", "massFraction", "density");
             var substance = entry.Value.Need(properties, "substance")?.Text();
             var stock = ReadStock(entry.Value, properties, substance, entry.Key);
@@ -125,7 +146,7 @@ internal sealed class RecipeReader(JsonPlace root, SubstanceTable table, FaultLi
     {
         var properties = place.Properties(
             "id", "stock", "substance", "recipe", "concentration", "molality", "massFraction", "density", "volume", "mass", "amount", "purity");
-        var id = Optional(properties, "id")?.Text();
+        var id = Id(properties);
         var what = One(place, properties, "a stock, a substance or a recipe", "stock", "substance", "recipe");
         if (what == "stock")
         {
@@ -160,8 +181,7 @@ internal sealed class RecipeReader(JsonPlace root, SubstanceTable table, FaultLi
         Stock? stock = null;
         if (properties["stock"].Text() is { } name && !_stocks.TryGetValue(name, out stock))
         {
-            var known = _stocks.Count == 0 ? "none" : string.Join(", ", _stocks.Keys.OrderBy(key => key, StringComparer.Ordinal));
-            faults.Add(FaultKinds.UnknownStock, properties["stock"].Path, name, ("known", known));
+            faults.Add(FaultKinds.UnknownStock, properties["stock"].Path, name, ("known", _knownStocks ??= KnownStocks()));
         }
 
         _draft.AddSolution(stock, ReadVolumeOrMass(place, properties), id);
@@ -197,6 +217,13 @@ internal sealed class RecipeReader(JsonPlace root, SubstanceTable table, FaultLi
             var measure = taken is null ? null : properties[taken].Measure(taken == "mass" ? Dimension.Mass : Dimension.Amount);
             _draft.AddSubstance(substance, measure, Optional(properties, "purity")?.Measure(Dimension.MassFraction), id);
         }
+    }
+
+    private string KnownStocks()
+    {
+        const int most = 20;
+        var names = _stocks.Keys.OrderBy(key => key, StringComparer.Ordinal).Take(most);
+        return _stocks.Count == 0 ? "none" : string.Join(", ", names) + (_stocks.Count > most ? " …" : "");
     }
 
     private Measure? ReadVolumeOrMass(JsonPlace place, IReadOnlyDictionary<string, JsonPlace> properties) =>

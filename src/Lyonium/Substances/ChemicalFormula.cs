@@ -19,7 +19,7 @@ public sealed class ChemicalFormula
         Composition = composition;
         Charge = charge;
         CrystalWater = crystalWater;
-        Display = FormulaDisplay.Of(text);
+        Display = FormulaDisplay.Of(Normalize(text));
     }
 
     /// <summary>The formula as it is written in the table.</summary>

@@ -40,7 +40,7 @@ internal sealed class FamilyReader(SourcedValueReader values)
     {
         var properties = place.Properties("id", "name", "forms", "steps", "note");
         var id = TableId.Read(place, properties);
-        var name = place.Need(properties, "name")?.Text();
+        var name = TableText.Read(place, properties, "name");
         var formPlaces = place.Need(properties, "forms")?.Items() ?? [];
         var forms = formPlaces.Select(ReadForm).ToArray();
         var stepPlaces = place.Need(properties, "steps")?.Items() ?? [];

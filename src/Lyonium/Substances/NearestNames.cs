@@ -7,6 +7,9 @@ namespace Lyonium.Substances;
 /// <summary>The names nearest to one that was not found, by the number of letters to change (Levenshtein distance).</summary>
 internal static class NearestNames
 {
+    // Folding shortens a name by a few letters at most.
+    private const int Slack = 4;
+
     public static IReadOnlyList<string> To(string wanted, IEnumerable<string> names)
     {
         // A name longer than any substance's is no typing error, and must not cost time.
@@ -18,6 +21,7 @@ internal static class NearestNames
         var folded = NameFolding.Fold(wanted);
         var farthest = Math.Max(2, folded.Length / 3);
         return names
+            .Where(name => Math.Abs(name.Length - folded.Length) <= farthest + Slack)
             .Select(name => (Name: name, Distance: Distance(folded, NameFolding.Fold(name))))
             .Where(one => one.Distance <= farthest)
             .OrderBy(one => one.Distance)

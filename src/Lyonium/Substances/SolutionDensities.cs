@@ -1,3 +1,4 @@
+using System;
 using System.Collections.Generic;
 using Lyonium.Provenance;
 
@@ -10,6 +11,10 @@ namespace Lyonium.Substances;
 public sealed class SolutionDensities
 {
     private const double WidestGap = 0.1000001;
+
+    // A concentration is a product: on a point it may differ from it in the last digit.
+    private const double LastDigits = 1e-12;
+
     private readonly IReadOnlyList<SolutionDensity> _points;
 
     internal SolutionDensities(IReadOnlyList<SolutionDensity> points) => _points = points;
@@ -49,7 +54,7 @@ public sealed class SolutionDensities
         for (var i = 0; i < _points.Count; i++)
         {
             var above = Concentration(i);
-            if (above == soluteKgPerL)
+            if (Math.Abs(above - soluteKgPerL) <= LastDigits * above)
             {
                 return _points[i].DensityKgPerL;
             }

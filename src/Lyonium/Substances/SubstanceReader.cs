@@ -32,7 +32,7 @@ internal sealed class SubstanceReader
         var properties = place.Properties(
             "id", "name", "synonyms", "formula", "otherFormulas", "brings", "protons", "density", "molarVolume", "solutionDensities", "groups");
         var id = TableId.Read(place, properties);
-        var name = place.Need(properties, "name")?.Text();
+        var name = TableText.Read(place, properties, "name");
         var synonyms = Texts(properties, "synonyms");
         var formulaPlace = place.Need(properties, "formula");
         var formula = ReadFormula(formulaPlace);
@@ -120,7 +120,11 @@ internal sealed class SubstanceReader
     {
         foreach (var one in synonyms.Concat([name, id]).GroupBy(NameFolding.Fold, StringComparer.Ordinal).Select(group => group.First()))
         {
-            if (_names.Take(one, id) is { } owner)
+            if (NameFolding.Fold(one).Length == 0)
+            {
+                place.Faults.Add(FaultKinds.TableBadValue, place.Path, one, ("detail", "a name has letters"));
+            }
+            else if (_names.Take(one, id) is { } owner)
             {
                 place.Faults.Add(FaultKinds.TableDuplicate, place.Path, one, ("owner", owner));
             }

@@ -122,7 +122,7 @@ public sealed class SubstanceTable
             return null;
         }
 
-        faults.Add(FaultKinds.UnknownSubstance, path, nameOrFormula, ("suggestion", Suggest(nameOrFormula)));
+        faults.Add(FaultKinds.UnknownSubstance, path, nameOrFormula, ("suggestion", faults.IsFull ? "" : Suggest(nameOrFormula)));
         return null;
     }
 

@@ -34,7 +34,7 @@ internal static class SubstanceTableReader
         }
 
         var properties = root.Properties(Sections);
-        var edition = root.Need(properties, "edition")?.Text();
+        var edition = TableText.Read(root, properties, "edition");
         var values = new SourcedValueReader(ReadSources(root.Need(properties, "sources"), faults));
         var weights = ReadElements(root.Need(properties, "elements"), values);
         var families = new FamilyReader(values).Read(root.Need(properties, "families"));
@@ -57,7 +57,7 @@ internal static class SubstanceTableReader
         }
 
         var properties = root.Properties(Sections);
-        var edition = root.Need(properties, "edition")?.Text();
+        var edition = TableText.Read(root, properties, "edition");
         var ownSources = ReadSources(Optional(properties, "sources"), faults);
         var values = new SourcedValueReader(Over(below.Sources, ownSources, source => source.Key));
         var weights = Over(below.AtomicWeights, ReadElements(Optional(properties, "elements"), values), one => one.Symbol);
@@ -109,29 +109,6 @@ internal static class SubstanceTableReader
         }
     }
 
-    private static AtomicWeight[] ReadElements(JsonPlace? list, SourcedValueReader values)
-    {
-        var weights = new List<AtomicWeight>();
-        foreach (var place in Items(list))
-        {
-            if (ReadElement(place, values) is not { } weight)
-            {
-                continue;
-            }
-
-            if (weights.Exists(one => string.Equals(one.Symbol, weight.Symbol, StringComparison.Ordinal)))
-            {
-                place.Faults.Add(FaultKinds.TableDuplicate, place.Path + ".symbol", weight.Symbol, ("owner", "another element"));
-            }
-            else
-            {
-                weights.Add(weight);
-            }
-        }
-
-        return weights.ToArray();
-    }
-
     private static IReadOnlyList<JsonPlace> Items(JsonPlace? place) => place?.Items() ?? [];
 
     private static List<Source> ReadSources(JsonPlace? list, FaultList faults)
@@ -141,7 +118,7 @@ internal static class SubstanceTableReader
         foreach (var place in Items(list))
         {
             var properties = place.Properties("key", "citation");
-            if (place.Need(properties, "key")?.Text() is not { } key || place.Need(properties, "citation")?.Text() is not { } citation)
+            if (TableText.Read(place, properties, "key") is not { } key || TableText.Read(place, properties, "citation") is not { } citation)
             {
                 continue;
             }
@@ -149,10 +126,6 @@ internal static class SubstanceTableReader
             if (!keys.Add(key))
             {
                 faults.Add(FaultKinds.TableDuplicate, place.Path + ".key", key, ("owner", "another source"));
-            }
-            else if (citation.Trim().Length == 0)
-            {
-                faults.Add(FaultKinds.TableBadValue, place.Path + ".citation", citation, ("detail", "a source needs its citation"));
             }
             else
             {
@@ -163,10 +136,34 @@ internal static class SubstanceTableReader
         return sources;
     }
 
+    private static AtomicWeight[] ReadElements(JsonPlace? list, SourcedValueReader values)
+    {
+        var weights = new List<AtomicWeight>();
+        var symbols = new HashSet<string>(StringComparer.Ordinal);
+        foreach (var place in Items(list))
+        {
+            if (ReadElement(place, values) is not { } element)
+            {
+                continue;
+            }
+
+            if (symbols.Add(element.Symbol))
+            {
+                weights.Add(element);
+            }
+            else
+            {
+                place.Faults.Add(FaultKinds.TableDuplicate, place.Path + ".symbol", element.Symbol, ("owner", "another element"));
+            }
+        }
+
+        return weights.ToArray();
+    }
+
     private static AtomicWeight? ReadElement(JsonPlace place, SourcedValueReader values)
     {
         var properties = place.Properties("symbol", "weight", "uncertainty", "source", "known", "note");
-        var symbol = place.Need(properties, "symbol")?.Text();
+        var symbol = TableText.Read(place, properties, "symbol");
         var weight = values.Finish(place, properties, place.Need(properties, "weight"), "uncertainty");
         if (weight is { Value: <= 0 })
         {

@@ -194,6 +194,17 @@ public sealed class UserTableTests
         Assert.Contains(faults, one => one.Path == $"$.{list}[{index}].{property}");
     }
 
+    [Theory]
+    [InlineData(" ")]
+    [InlineData("-")]
+    [InlineData("Oxalic Acid Dihydrate")]
+    public void TryRead_badSynonym_isRefused(string synonym)
+    {
+        var faults = UserTable.FaultsOf(table => table["substances"]![0]!["synonyms"] = new JsonArray(synonym));
+
+        Assert.Single(faults);
+    }
+
     [Fact]
     public void TryRead_everyPropertyLeftOut_isRefusedWithItsName()
     {
