@@ -66,7 +66,7 @@ public sealed class Fault
         var values = new SortedDictionary<string, string>(StringComparer.Ordinal) { ["found"] = shown };
         foreach (var (name, value) in arguments)
         {
-            values[name] = Shown(value, LongestArgument);
+            values[name] = Shown(value ?? "", LongestArgument);
         }
 
         return new Fault(kind, Shown(path, LongestArgument), shown, values, []);

@@ -2,6 +2,7 @@ using System;
 using System.Collections.Generic;
 using System.Globalization;
 using Lyonium.Equilibria;
+using Lyonium.Quantities;
 using Lyonium.Recipes;
 using UnitsNet;
 
@@ -43,8 +44,16 @@ public sealed class Prediction
     {
         get
         {
-            var rounded = Math.Round(PH, 2, MidpointRounding.AwayFromZero) + 0.0;
-            return rounded.ToString("F2", CultureInfo.InvariantCulture);
+            // The digits that a record shows are rounded, half away from zero: 1.005 is reported as 1.01, although its double lies below.
+            const double largestDecimal = 1e20;
+            if (!(Math.Abs(PH) < largestDecimal))
+            {
+                return NumberText.Shortest(PH);
+            }
+
+            var shown = decimal.Parse(NumberText.Shortest(PH), NumberStyles.Float, CultureInfo.InvariantCulture);
+            var rounded = Math.Round(shown, 2, MidpointRounding.AwayFromZero);
+            return (rounded == 0 ? 0m : rounded).ToString("F2", CultureInfo.InvariantCulture);
         }
     }
 

@@ -14,6 +14,9 @@ internal sealed class RecipeDraft
     private const double ZeroCelsiusK = 273.15;
     private const double HundredCelsiusK = 373.15;
 
+    /// <summary>What a poured part must say.</summary>
+    public const string VolumeOrMass = "a volume or a mass";
+
     private readonly List<Part> _parts = [];
 
     // Parts that were refused keep their place, so that paths stay those of the input.
@@ -93,6 +96,12 @@ internal sealed class RecipeDraft
 
     public void AddSolution(Stock? stock, Measure? taken, string? id)
     {
+        if (stock is { Name: null } && WaterName.Is(stock.Substance))
+        {
+            RefuseBesideWater(Stock.StrengthProperty(stock.Strength.Dimension));
+            stock = null;
+        }
+
         if (stock is not null && Checked(taken) is { } sound)
         {
             AddPart(new SolutionPart(stock, sound, id));
@@ -103,9 +112,9 @@ internal sealed class RecipeDraft
 
     public void AddSubstance(string? substance, Measure? taken, Measure? purity, string? id)
     {
-        if (substance is not null && WaterName.Is(substance) && taken is { Dimension: Dimension.Mass } && purity is null)
+        if (substance is not null && WaterName.Is(substance))
         {
-            AddWater(taken, id);
+            AddWaterByMass(taken, purity, id);
             return;
         }
 
@@ -117,6 +126,26 @@ internal sealed class RecipeDraft
 
         _positions++;
     }
+
+    // Water is taken by volume or mass, and has no purity.
+    private void AddWaterByMass(Measure? taken, Measure? purity, string? id)
+    {
+        if (purity is not null)
+        {
+            RefuseBesideWater("purity");
+        }
+
+        if (taken is { Dimension: Dimension.Amount })
+        {
+            RefuseBesideWater("amount");
+            Faults.Add(FaultKinds.Incomplete, NextPath, "", ("missing", VolumeOrMass));
+            taken = null;
+        }
+
+        AddWater(taken, id);
+    }
+
+    private void RefuseBesideWater(string property) => Faults.Add(FaultKinds.Contradictory, NextPath, "water and " + property);
 
     public void AddWater(Measure? taken, string? id)
     {
@@ -226,13 +255,24 @@ internal sealed class RecipeDraft
 
     private void CheckIds()
     {
+        CheckId(Id, _root + ".id");
         var taken = new HashSet<string>(StringComparer.Ordinal);
         for (var i = 0; i < _parts.Count; i++)
         {
-            if (_parts[i].Id is { } id && !taken.Add(id))
+            var path = PathOf(_root, _positionOf[i]) + ".id";
+            CheckId(_parts[i].Id, path);
+            if (_parts[i].Id is { Length: > 0 } id && !taken.Add(id))
             {
-                Faults.Add(FaultKinds.DuplicateName, PathOf(_root, _positionOf[i]) + ".id", id);
+                Faults.Add(FaultKinds.DuplicateName, path, id);
             }
+        }
+    }
+
+    private void CheckId(string? id, string path)
+    {
+        if (id?.Length == 0)
+        {
+            Faults.Add(FaultKinds.Incomplete, path, id, ("missing", "an id of one or more characters"));
         }
     }
 }

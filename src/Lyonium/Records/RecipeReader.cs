@@ -23,7 +23,7 @@ internal sealed class RecipeReader(JsonPlace root, SubstanceTable table, FaultLi
     private Recipe? ReadInner()
     {
         var properties = root.Properties("format", "id", "name", "temperature", "preparedAt", "stocks", "parts", "makeUpTo", "notes");
-        _draft.Id = Id(properties);
+        _draft.Id = Optional(properties, "id")?.Text();
         _draft.Name = Optional(properties, "name")?.Text();
         _draft.Notes = Optional(properties, "notes")?.RawObject();
         _draft.SetTemperature(Optional(properties, "temperature")?.Measure(Dimension.Temperature));
@@ -45,21 +45,6 @@ internal sealed class RecipeReader(JsonPlace root, SubstanceTable table, FaultLi
 
     private static JsonPlace? Optional(IReadOnlyDictionary<string, JsonPlace> properties, string name) =>
         properties.TryGetValue(name, out var place) ? place : null;
-
-    private string? Id(IReadOnlyDictionary<string, JsonPlace> properties)
-    {
-        if (Optional(properties, "id") is not { } place || place.Text() is not { } id)
-        {
-            return null;
-        }
-
-        if (id.Length == 0)
-        {
-            faults.Add(FaultKinds.Incomplete, place.Path, id, ("missing", "an id of one or more characters"));
-        }
-
-        return id;
-    }
 
     private void ReadStocks(JsonPlace? list)
     {
@@ -146,7 +131,7 @@ internal sealed class RecipeReader(JsonPlace root, SubstanceTable table, FaultLi
     {
         var properties = place.Properties(
             "id", "stock", "substance", "recipe", "concentration", "molality", "massFraction", "density", "volume", "mass", "amount", "purity");
-        var id = Id(properties);
+        var id = Optional(properties, "id")?.Text();
         var what = One(place, properties, "a stock, a substance or a recipe", "stock", "substance", "recipe");
         if (what == "stock")
         {
@@ -227,7 +212,7 @@ internal sealed class RecipeReader(JsonPlace root, SubstanceTable table, FaultLi
     }
 
     private Measure? ReadVolumeOrMass(JsonPlace place, IReadOnlyDictionary<string, JsonPlace> properties) =>
-        One(place, properties, "a volume or a mass", "volume", "mass") is { } name
+        One(place, properties, RecipeDraft.VolumeOrMass, "volume", "mass") is { } name
             ? properties[name].Measure(name == "mass" ? Dimension.Mass : Dimension.Volume)
             : null;
 
