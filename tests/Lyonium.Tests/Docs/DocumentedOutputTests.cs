@@ -24,8 +24,14 @@ public sealed partial class DocumentedOutputTests
     public void Page_shows_what_the_tool_prints(string page)
     {
         var text = File.ReadAllText(Repository.Path(page)).Replace("\r\n", "\n", StringComparison.Ordinal);
-        var current = Block().Replace(text, block => block.Groups["before"].Value + Print(block) + block.Groups["after"].Value);
-        Assert.Equal(Block().Count(text), Regex.Count(text, "<!-- lyonium "));
+        var blocks = Block().Matches(text).ToArray();
+        Assert.Equal(Regex.Count(text, "<!-- lyonium "), blocks.Length);
+        var current = text;
+        foreach (var shown in blocks.Reverse().Select(block => (Place: block.Groups["shown"], Output: Print(block))))
+        {
+            current = current.Remove(shown.Place.Index, shown.Place.Length).Insert(shown.Place.Index, shown.Output);
+        }
+
         if (Update)
         {
             File.WriteAllText(Repository.Path(page), current);

@@ -6,6 +6,7 @@ using Lyonium.Faults;
 using Lyonium.Predictions;
 using Lyonium.Quantities;
 using Lyonium.Records;
+using Lyonium.Substances;
 using Lyonium.Tests.Records;
 using Lyonium.Tests.Substances;
 using Xunit;
@@ -20,7 +21,7 @@ public sealed class EveryKindTests
     [Fact]
     public void EveryKind_isMadeSomewhereWithItsTextsFilled()
     {
-        var faults = OfRecipes().Concat(OfTables()).Concat(OfMethods()).ToArray();
+        var faults = OfRecipes().Concat(OfTables()).Concat(OfLayers()).Concat(OfRecords()).Concat(OfMethods()).ToArray();
         FaultText.Check(faults);
         var made = faults.Select(one => one.Code).ToHashSet(StringComparer.Ordinal);
 
@@ -28,6 +29,15 @@ public sealed class EveryKindTests
         var files = new[] { FaultKinds.FileNotFound, FaultKinds.IsAFolder, FaultKinds.CannotRead };
         var missing = FaultKinds.All.Except(files).Where(kind => !made.Contains(kind.Code)).Select(kind => kind.Code + " " + kind.Title);
         Assert.Empty(missing);
+    }
+
+    private static IReadOnlyList<Fault> OfLayers() => Layer.TryOver(SubstanceTable.Default, Layer.With(
+        families: Layer.Family("acetate", ["CH3COOH2^+", "CH3COOH"], Layer.Step(4.7)))).Faults;
+
+    private static IReadOnlyList<Fault> OfRecords()
+    {
+        var record = RecordJson.Write(new Predictor().Predict(RecipeJson.Read(RecipeText.With(Kilogram))));
+        return new RecordReplay(SubstanceTable.Default).TryReplay(record.Replace("\"exact\"", "\"guess\"", StringComparison.Ordinal)).Faults;
     }
 
     private static IEnumerable<Fault> OfRecipes()
@@ -58,6 +68,7 @@ public sealed class EveryKindTests
                 "{ \"substance\": \"C4H4O4\", \"mass\": \"1 g\" }",
                 "{ \"stock\": \"none\", \"volume\": \"1 L\" }",
                 "{ \"recipe\": { } }")),
+            RecipeText.With("{ \"recipe\": " + RecipeText.With(Kilogram) + ", \"mass\": \"2 kg\" }"),
         ];
         foreach (var fault in documents.SelectMany(one => RecipeText.Try(one).Faults))
         {

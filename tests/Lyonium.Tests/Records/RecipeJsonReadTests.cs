@@ -190,7 +190,7 @@ public sealed class RecipeJsonReadTests
     [InlineData("{ \"stock\": \"acid\", \"substance\": \"HCl\", \"volume\": \"1 L\" }", "LYO0402 $.parts[0]")]
     [InlineData("{ \"stock\": \"acid\", \"concentration\": \"1 mol/L\", \"volume\": \"1 L\" }", "LYO0402 $.parts[0]")]
     [InlineData("{ \"stock\": \"acid\", \"amount\": \"1 mol\" }", "LYO0402 $.parts[0]")]
-    [InlineData("{ \"recipe\": { } }", "LYO0411 $.parts[0].recipe")]
+    [InlineData("{ \"recipe\": { } }", "LYO0207 $.parts[0].recipe")]
     public void TryRead_badPart_isRefusedAtItsPlace(string part, string expected) =>
         Assert.Contains(expected, RecipeText.CodesAndPathsOf(RecipeText.With(part + ", " + Water)));
 
