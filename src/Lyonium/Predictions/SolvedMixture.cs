@@ -52,7 +52,10 @@ internal sealed class SolvedMixture
                 return Refuse(FaultKinds.MethodFailed, "the answer lies outside its own bracket", method, model);
             }
 
-            return new Attempt<SolvedMixture>(new SolvedMixture(modelled, outcome, Speciation.At(modelled.Equilibrium, model, outcome.PH)));
+            var speciation = Speciation.At(modelled.Equilibrium, model, outcome.PH);
+            return IsRepresentable(speciation)
+                ? new Attempt<SolvedMixture>(new SolvedMixture(modelled, outcome, speciation))
+                : Refuse(FaultKinds.MethodFailed, "activity coefficients are beyond what a number holds", method, model);
         }
         catch (Exception e) when (e is not OutOfMemoryException)
         {
@@ -82,6 +85,15 @@ internal sealed class SolvedMixture
         }
 
         return species;
+    }
+
+    // An answer whose coefficients or hydrogen ion overflow cannot be written down, whatever its pH.
+    private static bool IsRepresentable(Speciation speciation)
+    {
+        const double largestLog10 = 300;
+        return speciation.MolalitiesMolPerKg[Equilibrium.HydrogenIon] > 0
+            && speciation.Log10Gammas.All(one => Math.Abs(one) < largestLog10)
+            && speciation.MolalitiesMolPerKg.All(one => !double.IsNaN(one) && !double.IsInfinity(one));
     }
 
     private static FaultKind KindOf(SolverStatus status) => status switch

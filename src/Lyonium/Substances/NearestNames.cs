@@ -10,6 +10,9 @@ internal static class NearestNames
     // Folding shortens a name by a few letters at most.
     private const int Slack = 4;
 
+    // More changes than this make another word.
+    private const int Farthest = 8;
+
     public static IReadOnlyList<string> To(string wanted, IEnumerable<string> names)
     {
         // A name longer than any substance's is no typing error, and must not cost time.
@@ -19,10 +22,10 @@ internal static class NearestNames
         }
 
         var folded = NameFolding.Fold(wanted);
-        var farthest = Math.Max(2, folded.Length / 3);
+        var farthest = Math.Min(Farthest, Math.Max(2, folded.Length / 3));
         return names
             .Where(name => Math.Abs(name.Length - folded.Length) <= farthest + Slack)
-            .Select(name => (Name: name, Distance: Distance(folded, NameFolding.Fold(name))))
+            .Select(name => (Name: name, Distance: Distance(folded, NameFolding.Fold(name), farthest)))
             .Where(one => one.Distance <= farthest)
             .OrderBy(one => one.Distance)
             .ThenBy(one => one.Name, StringComparer.Ordinal)
@@ -32,17 +35,25 @@ internal static class NearestNames
             .ToArray();
     }
 
-    private static int Distance(string a, string b)
+    // The distance, or some number above the farthest that is looked for.
+    private static int Distance(string a, string b, int farthest)
     {
         var above = Enumerable.Range(0, b.Length + 1).ToArray();
         var row = new int[b.Length + 1];
         for (var i = 1; i <= a.Length; i++)
         {
             row[0] = i;
+            var least = i;
             for (var j = 1; j <= b.Length; j++)
             {
                 var change = above[j - 1] + (a[i - 1] == b[j - 1] ? 0 : 1);
                 row[j] = Math.Min(change, 1 + Math.Min(above[j], row[j - 1]));
+                least = Math.Min(least, row[j]);
+            }
+
+            if (least > farthest)
+            {
+                return least;
             }
 
             (above, row) = (row, above);
