@@ -6,7 +6,7 @@ using Lyonium.Predictions;
 using Lyonium.Records;
 using Lyonium.Solvers;
 using Lyonium.Substances;
-using Lyonium.Tests.Docs;
+
 using Lyonium.Tests.Substances;
 using Xunit;
 
@@ -21,7 +21,7 @@ public sealed class RecordReplayTests
         get
         {
             var cases = new TheoryData<string, string, string>();
-            foreach (var file in Directory.EnumerateFiles(Repository.Path("docs/examples"), "*.json").Order(StringComparer.Ordinal))
+            foreach (var file in Directory.EnumerateFiles(Repository.File("docs/examples"), "*.json").Order(StringComparer.Ordinal))
             {
                 foreach (var model in ActivityModels.All)
                 {
@@ -109,5 +109,5 @@ public sealed class RecordReplayTests
     private static string Record(string example, string method, string model) =>
         RecordJson.Write(new Predictor(SubstanceTable.Default, Methods.Find(method), ActivityModels.Find(model)).Predict(RecipeJson.Read(Example(example))));
 
-    private static string Example(string name) => File.ReadAllText(Repository.Path("docs/examples/" + name));
+    private static string Example(string name) => File.ReadAllText(Repository.File("docs/examples/" + name));
 }
