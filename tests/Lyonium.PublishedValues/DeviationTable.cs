@@ -30,6 +30,15 @@ public sealed class DeviationTable(ITestOutputHelper output, string title, strin
             title + ": " + string.Join("; ", judged.Where(row => !row.Holds).Select(row => row.ToString())));
     }
 
+    /// <summary>The table as Markdown, its deviations to four decimals.</summary>
+    public string ToMarkdown()
+    {
+        var rows = _rows.Select(row => string.Create(
+            CultureInfo.InvariantCulture,
+            $"| {row.Inputs} | {row.Expected:0.000#} | {row.Obtained:F4} | {row.Deviation:+0.0000;-0.0000} | {(row.IsJudged ? row.Tolerance.ToString("G3", CultureInfo.InvariantCulture) : "reported")} | {row.Known} |"));
+        return $"## {title}\n\n| what | published | obtained | deviation | tolerance | known |\n|---|---|---|---|---|---|\n{string.Join('\n', rows)}\n";
+    }
+
     private void Print()
     {
         output.WriteLine(title);
