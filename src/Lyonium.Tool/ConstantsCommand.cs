@@ -15,31 +15,34 @@ internal static class ConstantsCommand
             Description = "a substance (name, id or formula) or a family; all of them where it is left out",
             Arity = ArgumentArity.ZeroOrOne,
         };
-        var command = new Command("constants", "Looks up substances and their constants, with the sources.") { name };
-        command.SetAction(parsed => Run(parsed.GetValue(name)));
+        var table = TableOption.Create();
+        var command = new Command("constants", "Looks up substances and their constants, with the sources.") { name, table };
+        command.SetAction(parsed =>
+        {
+            var opened = TableOption.Open(parsed.GetValue(table));
+            return opened.Success ? Run(parsed.GetValue(name), opened.Value) : OutputFormat.Print(opened.Faults, asJson: false);
+        });
         return command;
     }
 
-    private static int Run(string? name)
+    private static int Run(string? name, SubstanceTable table)
     {
-        var table = SubstanceTable.Default;
-        var text = new ConstantsText(table, Terminal.Create());
         if (name is null)
         {
-            text.PrintAll();
+            Terminal.Print(console => new ConstantsText(table, console).PrintAll());
             return ExitStatus.Done;
         }
 
         var substance = table.Find(name);
         if (substance.Success)
         {
-            text.Print(substance.Value);
+            Terminal.Print(console => new ConstantsText(table, console).Print(substance.Value));
             return ExitStatus.Done;
         }
 
         if (table.Families.FirstOrDefault(one => string.Equals(one.Id, name.Trim(), StringComparison.OrdinalIgnoreCase)) is { } family)
         {
-            text.Print(family);
+            Terminal.Print(console => new ConstantsText(table, console).Print(family));
             return ExitStatus.Done;
         }
 

@@ -14,7 +14,9 @@ internal static class NumberFormat
             return "0";
         }
 
-        var magnitude = (int)Math.Floor(Math.Log10(Math.Abs(value)));
+        // The magnitude after rounding: 0.0099999 to four digits is 0.01000.
+        var rounded = double.Parse(value.ToString("G" + digits.ToString(CultureInfo.InvariantCulture), CultureInfo.InvariantCulture), CultureInfo.InvariantCulture);
+        var magnitude = (int)Math.Floor(Math.Log10(Math.Abs(rounded)));
         if (magnitude is < -4 or > 5)
         {
             return value.ToString("0." + new string('0', digits - 1) + "e0", CultureInfo.InvariantCulture);

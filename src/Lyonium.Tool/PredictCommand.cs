@@ -1,8 +1,9 @@
 using System;
 using System.CommandLine;
+using Lyonium.Activity;
 using Lyonium.Predictions;
 using Lyonium.Records;
-using Lyonium.Substances;
+using Lyonium.Solvers;
 
 namespace Lyonium.Tool;
 
@@ -14,18 +15,29 @@ internal static class PredictCommand
         var recipe = new Argument<string>("RECIPE") { Description = "a file of lyonium-recipe/1, or - for standard input" };
         var method = Plugins.MethodOption();
         var activity = Plugins.ActivityOption();
+        var table = TableOption.Create();
+        var steps = new Option<bool>("--steps") { Description = "show the worked steps after the answer (text only)" };
         var format = OutputFormat.Option();
-        var command = new Command("predict", "Predicts the pH of a recipe.") { recipe, method, activity, format };
-        command.SetAction(parsed => Run(
-            parsed.GetValue(recipe)!,
-            new Predictor(SubstanceTable.Default, Plugins.Method(parsed.GetValue(method)!), Plugins.Activity(parsed.GetValue(activity)!)),
-            OutputFormat.IsJson(parsed.GetValue(format)!)));
+        var command = new Command("predict", "Predicts the pH of a recipe.") { recipe, method, activity, table, steps, format };
+        command.SetAction(parsed =>
+        {
+            var asJson = OutputFormat.IsJson(parsed.GetValue(format)!);
+            var opened = TableOption.Open(parsed.GetValue(table));
+            if (!opened.Success)
+            {
+                return OutputFormat.Print(opened.Faults, asJson);
+            }
+
+            var predictor = new Predictor(
+                opened.Value, Methods.Find(parsed.GetValue(method)!), ActivityModels.Find(parsed.GetValue(activity)!));
+            return Run(parsed.GetValue(recipe)!, predictor, parsed.GetValue(steps), asJson);
+        });
         return command;
     }
 
-    private static int Run(string file, Predictor predictor, bool asJson)
+    private static int Run(string file, Predictor predictor, bool withSteps, bool asJson)
     {
-        var recipe = RecipeFile.Read(file, predictor.Table);
+        var recipe = InputFile.ReadRecipe(file, predictor.Table);
         if (!recipe.Success)
         {
             return OutputFormat.Print(recipe.Faults, asJson);
@@ -40,10 +52,14 @@ internal static class PredictCommand
         if (asJson)
         {
             Console.Out.WriteLine(RecordJson.Write(prediction.Value));
+            return ExitStatus.Done;
         }
-        else
+
+        Terminal.Print(new PredictionText(prediction.Value).Print);
+        if (withSteps)
         {
-            new PredictionText(prediction.Value).Print(Terminal.Create());
+            Console.Out.WriteLine();
+            Console.Out.Write(prediction.Value.Work().ToText());
         }
 
         return ExitStatus.Done;

@@ -46,7 +46,7 @@ internal sealed class PredictionText(Prediction prediction)
     {
         var recipe = prediction.Recipe;
         var celsius = NumberFormat.Short(recipe.TemperatureK - 273.15);
-        console.MarkupLineInterpolated($"[bold]{recipe.Name ?? "Recipe"}[/]{(recipe.Id is null ? "" : "  " + recipe.Id)}");
+        console.MarkupLineInterpolated($"[bold]{PlainText.Of(recipe.Name ?? "Recipe")}[/]{(recipe.Id is null ? "" : "  " + PlainText.Of(recipe.Id))}");
         console.MarkupLineInterpolated($"[bold green]pH {prediction.Reported}[/] at {celsius} °C");
         var brief = new Grid().AddColumn(new GridColumn { Padding = new Padding(2, 0, 2, 0) }).AddColumn();
         Row(brief, "pH", prediction.PH.ToString("F4", CultureInfo.InvariantCulture) + "  (activity, molality scale)");
@@ -63,12 +63,12 @@ internal sealed class PredictionText(Prediction prediction)
     {
         Heading(console, "Poured and weighed");
         var grid = Columns(0, 2);
-        foreach (var part in prediction.Mixture.Parts)
+        foreach (var part in prediction.Mixture.Parts.Where(part => part.Inside is null || part.Substance is not null))
         {
             Row(
                 grid,
-                part.Part.Taken.ToString(),
-                Describe(part),
+                part.Inside is null ? Taken(part.Part) : "",
+                (part.Inside is null ? "" : "  of which ") + Describe(part),
                 part.Substance is null ? "" : NumberFormat.Amount(part.AmountMol),
                 "");
         }
@@ -81,9 +81,13 @@ internal sealed class PredictionText(Prediction prediction)
         console.Write(grid);
     }
 
+    private static string Taken(Part part) => part is RecipePart { IsAll: true } ? "all" : part.Taken.ToString();
+
     private static string Describe(PreparedPart part) => part.Part switch
     {
-        SolutionPart { Stock: var stock } => part.Substance!.Name + " " + stock.Strength + (stock.Name is null ? "" : $"  ({stock.Name})"),
+        RecipePart { Recipe.Name: { } name } => PlainText.Of(name),
+        RecipePart => "another recipe",
+        SolutionPart { Stock: var stock } => part.Substance!.Name + " " + stock.Strength + (stock.Name is null ? "" : $"  ({PlainText.Of(stock.Name)})"),
         SubstancePart { Purity: { } purity } => part.Substance!.Name + ", " + purity,
         SubstancePart => part.Substance!.Name,
         _ => "water",
@@ -120,7 +124,7 @@ internal sealed class PredictionText(Prediction prediction)
         foreach (var one in prediction.Assumptions)
         {
             grid.AddRow(
-                new Text(one.Held ? "held" : "NOT HELD", one.Held ? Style.Plain : new Style(Color.Red, decoration: Decoration.Bold)),
+                new Text(one.Held ? (one.Limit is null ? "assumed" : "held") : "NOT HELD", one.Held ? Style.Plain : new Style(Color.Red, decoration: Decoration.Bold)),
                 new Text(one.Code.Replace('-', ' ') + (one.Of == "mixture" ? "" : " (" + one.Of + ")")),
                 new Text(Figure(one)));
         }

@@ -10,6 +10,7 @@ try
     var root = new RootCommand("Predicts the pH of mixtures of acids, bases and salts, and shows what the answer rests on.")
     {
         PredictCommand.Create(),
+        CompareCommand.Create(),
         ConstantsCommand.Create(),
     };
     var parsed = root.Parse(args);

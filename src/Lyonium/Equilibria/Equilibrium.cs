@@ -31,7 +31,7 @@ public sealed class Equilibrium
     /// <param name="hydroxideIonSizeAngstrom">The ion-size parameter of the hydroxide ion, in ångström.</param>
     /// <exception cref="ArgumentException">
     /// A species names a component that is not there; a component is in no species; or two rungs of one component differ in charge by
-    /// something else than their protons.
+    /// something else than their protons, have the same protons, or have constants more than 300 decades apart; or pKw is not within ±300.
     /// </exception>
     public Equilibrium(
         IReadOnlyList<Constraint> constraints,
@@ -43,6 +43,11 @@ public sealed class Equilibrium
         _ = constraints ?? throw new ArgumentNullException(nameof(constraints));
         _ = species ?? throw new ArgumentNullException(nameof(species));
         Solvent = solvent ?? throw new ArgumentNullException(nameof(solvent));
+        if (!(Math.Abs(solvent.PKw) <= 300))
+        {
+            throw new ArgumentException("pKw is a finite number within ±300.", nameof(solvent));
+        }
+
         Constraints = Array.AsReadOnly(constraints.ToArray());
         Species = Array.AsReadOnly(species.ToArray());
         _charges = new[] { 1, -1 }.Concat(Species.Select(one => one.Charge)).ToArray();

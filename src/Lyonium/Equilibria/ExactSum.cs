@@ -1,3 +1,5 @@
+using System.Runtime.CompilerServices;
+
 namespace Lyonium.Equilibria;
 
 /// <summary>A running sum that keeps what rounding drops, so that 5 mol/kg of charge almost neutralised leaves its true rest.</summary>
@@ -10,9 +12,7 @@ internal struct ExactSum
     /// <summary>The sum, rounded once.</summary>
     public readonly double Value => _sum + _rest;
 
-    /// <summary>The sum and a further number, rounded once where they cancel.</summary>
-    public readonly double Plus(double value) => _sum + value + _rest;
-
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public void Add(double value)
     {
         var sum = _sum + value;
@@ -22,6 +22,7 @@ internal struct ExactSum
     }
 
     /// <summary>Adds a number times a whole number below 2^26 in magnitude, with no rounding of the product.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public void AddProduct(double value, int factor)
     {
         const double splitter = 134217729; // 2^27 + 1

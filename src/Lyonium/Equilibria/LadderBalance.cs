@@ -17,6 +17,7 @@ namespace Lyonium.Equilibria;
 internal ref struct LadderBalance
 {
     private const int MostRounds = 200;
+    private const double HalfLastDigit = 1.1102230246251565e-16;
 
     private readonly Equilibrium _equilibrium;
     private readonly LadderSet _ladders;
@@ -29,6 +30,7 @@ internal ref struct LadderBalance
     private double _inverseGammaH;
     private double _inverseGammaOH;
     private double _gammasAt;
+    private double _gammaNoise;
 
     /// <summary>Starts from activity coefficients of one.</summary>
     /// <param name="equilibrium">An equilibrium of ladders.</param>
@@ -66,11 +68,26 @@ internal ref struct LadderBalance
     /// <summary>The part of the charge that shrinks in inverse proportion to the hydrogen-ion activity, in mol/kg.</summary>
     public double Falling { get; private set; }
 
+    /// <summary>Σ z²m of what the hydrogen-ion activity moves, in mol/kg, charges counted from each ladder's fullest rung.</summary>
+    public double Moving { get; private set; }
+
+    /// <summary>
+    /// A bound on the relative rounding error of a share: at most sixteen roundings for each rung of distance, and what its activity
+    /// coefficients may be off by.
+    /// </summary>
+    public readonly double RelativeNoise => (16 * HalfLastDigit) + (Math.Log(10) * _gammaNoise);
+
+    /// <summary>A bound on the rounding error of the net charge, in mol/kg: beyond it the sign is certain.</summary>
+    public readonly double Noise => RelativeNoise * Moving;
+
     /// <summary>Σ|z|m of what the totals fix, in mol/kg: how large the numbers are that the charge is a difference of.</summary>
     public double FixedMagnitude { get; private set; }
 
     /// <summary>The ionic strength, in mol/kg.</summary>
     public double IonicStrength { get; private set; }
+
+    /// <summary>Whether the model gave anything but activity coefficients of one.</summary>
+    public bool GammasMove { get; private set; }
 
     public readonly ReadOnlySpan<double> Molalities => _molalities;
 
@@ -91,16 +108,22 @@ internal ref struct LadderBalance
         {
             Speciate(activity);
             var miss = IonicStrength - _gammasAt;
-            if (round > 0 && change <= 1e-14 && Math.Abs(miss) <= 4e-16 * IonicStrength)
+            if (round > 0 && Math.Abs(miss) <= 1e-9 * IonicStrength)
             {
-                return true;
+                // What the last two rounds say that the coefficients are still off by.
+                var left = miss == 0 ? 0 : change * Math.Abs(miss / (miss - lastMiss));
+                if (left <= 1e-16 || Math.Abs(miss) <= 1e-15 * IonicStrength)
+                {
+                    _gammaNoise += left;
+                    return true;
+                }
             }
 
             if (miss > 0)
             {
                 low = _gammasAt;
             }
-            else if (round > 0)
+            else
             {
                 high = _gammasAt;
             }
@@ -109,7 +132,7 @@ internal ref struct LadderBalance
             lastAt = _gammasAt;
             lastMiss = miss;
             change = UseGammasAt(next);
-            if (change == 0)
+            if (change == 0 && next == IonicStrength)
             {
                 return true;
             }
@@ -122,7 +145,8 @@ internal ref struct LadderBalance
             if (!double.IsInfinity(high) && high - low <= 4e-16 * high)
             {
                 Speciate(activity);
-                return true;
+                _gammaNoise += change;
+                return Math.Abs(IonicStrength - _gammasAt) <= 1e-13 * IonicStrength;
             }
         }
 
@@ -133,7 +157,7 @@ internal ref struct LadderBalance
     private readonly double Next(int round, double low, double high, double miss, double lastAt, double lastMiss)
     {
         var next = IonicStrength;
-        if (round > 1 && miss != lastMiss)
+        if (round > 0 && miss != lastMiss)
         {
             var secant = _gammasAt - (miss * (_gammasAt - lastAt) / (miss - lastMiss));
             next = secant > 0.1 * next && secant < 10 * next ? secant : next;
@@ -155,19 +179,21 @@ internal ref struct LadderBalance
     private double UseGammasAt(double ionicStrength)
     {
         _model.Log10Gammas(_equilibrium, ionicStrength, _molalities, _nextLog10Gammas);
-        double change = 0;
-        for (var i = 0; i < _log10Gammas.Length; i++)
-        {
-            var difference = Math.Abs(_nextLog10Gammas[i] - _log10Gammas[i]);
-            change = difference <= change ? change : difference;
-        }
-
         _gammasAt = ionicStrength;
-        if (change == 0)
+        if (_nextLog10Gammas.SequenceEqual(_log10Gammas))
         {
             return 0;
         }
 
+        double change = 0, largest = 0;
+        for (var i = 0; i < _log10Gammas.Length; i++)
+        {
+            change = Math.Max(change, Math.Abs(_nextLog10Gammas[i] - _log10Gammas[i]));
+            largest = Math.Max(largest, Math.Abs(_nextLog10Gammas[i]));
+        }
+
+        _gammaNoise = 8 * HalfLastDigit * largest;
+        GammasMove = true;
         _nextLog10Gammas.CopyTo(_log10Gammas);
         _inverseGammaH = Math.Pow(10, -_log10Gammas[Equilibrium.HydrogenIon]);
         _inverseGammaOH = Math.Pow(10, -_log10Gammas[Equilibrium.HydroxideIon]);
@@ -176,7 +202,7 @@ internal ref struct LadderBalance
             if (_ladders.Gap[i] > 0)
             {
                 var shift = _log10Gammas[_ladders.Species[i - 1]] - _log10Gammas[_ladders.Species[i]];
-                _ratios[i] = Math.Pow(10, _ladders.Log10Ratio[i] + shift);
+                _ratios[i] = _ladders.Ratio[i] * Math.Pow(10, shift);
             }
         }
 
@@ -191,114 +217,96 @@ internal ref struct LadderBalance
         _molalities[Equilibrium.HydroxideIon] = hydroxide;
         Rising = hydrogen;
         Falling = hydroxide;
+        Moving = hydrogen + hydroxide;
         FixedMagnitude = _ladders.SpectatorChargeMagnitude;
-        var ionicStrength = _ladders.SpectatorIonicStrength + (0.5 * (hydrogen + hydroxide));
-        var fixedCharge = _ladders.SpectatorCharge;
-        var rest = hydrogen - hydroxide;
+        IonicStrength = _ladders.SpectatorIonicStrength + (0.5 * Moving);
+        var charge = _ladders.SpectatorCharge;
+        charge.Add(hydrogen);
+        charge.Add(-hydroxide);
         for (var ladder = 0; ladder < _ladders.Total.Length; ladder++)
         {
-            var start = _ladders.Start[ladder];
-            var end = _ladders.Start[ladder + 1];
-            var total = _ladders.Total[ladder];
-            var most = Fill(start, end, activity);
-            var charge = _ladders.Charge[most];
-            double sum = 0, excess = 0, square = 0, chargeSquare = 0;
-            for (var i = start; i < end; i++)
-            {
-                var share = _molalities[_ladders.Species[i]];
-                var above = _ladders.Charge[i] - charge;
-                sum += share;
-                excess += above * share;
-                square += above * above * share;
-                chargeSquare += _ladders.Charge[i] * _ladders.Charge[i] * share;
-            }
-
-            excess /= sum;
-            var scale = total / sum;
-            for (var i = start; i < end; i++)
-            {
-                _molalities[_ladders.Species[i]] *= scale;
-            }
-
-            ionicStrength += 0.5 * chargeSquare * scale;
-            var slope = total * ((square / sum) - (excess * excess));
-            if (excess >= 0)
-            {
-                Rising += slope;
-            }
-            else
-            {
-                Falling += slope;
-            }
-
-            rest += total * excess;
-            fixedCharge.AddProduct(total, charge);
-            FixedMagnitude += Math.Abs(charge) * total;
+            Speciate(ladder, activity, ref charge);
         }
 
-        IonicStrength = ionicStrength;
-        Charge = fixedCharge.Plus(rest);
+        Charge = charge.Value;
     }
 
-    // Leaves the rungs' amounts relative to each other in the molalities, and returns the rung with most.
-    private readonly int Fill(int start, int end, double activity)
+    private void Speciate(int ladder, double activity, ref ExactSum charge)
     {
-        const double tooLarge = 1e100;
-        const double tooSmall = 1e-200;
-        double share = 1, largest = 1;
-        var most = start;
-        _molalities[_ladders.Species[start]] = 1;
+        var start = _ladders.Start[ladder];
+        var end = _ladders.Start[ladder + 1];
+        var most = Fullest(start, end, activity);
+        var chargeOfMost = _ladders.Charge[most];
+
+        // Sums over the rungs above and below the fullest one, in units of what stands on that one.
+        double sum = 1, squares = chargeOfMost * chargeOfMost, above = 0, aboveSquares = 0, below = 0, belowSquares = 0;
+        _molalities[_ladders.Species[most]] = 1;
+        double share = 1;
+        for (var i = most + 1; i < end; i++)
+        {
+            share *= RatioToRungBelow(i, activity);
+            _molalities[_ladders.Species[i]] = share;
+            var distance = _ladders.Charge[i] - chargeOfMost;
+            sum += share;
+            above += distance * share;
+            aboveSquares += distance * distance * share;
+            squares += _ladders.Charge[i] * _ladders.Charge[i] * share;
+        }
+
+        share = 1;
+        for (var i = most - 1; i >= start; i--)
+        {
+            share /= RatioToRungBelow(i + 1, activity);
+            _molalities[_ladders.Species[i]] = share;
+            var distance = chargeOfMost - _ladders.Charge[i];
+            sum += share;
+            below += distance * share;
+            belowSquares += distance * distance * share;
+            squares += _ladders.Charge[i] * _ladders.Charge[i] * share;
+        }
+
+        var total = _ladders.Total[ladder];
+        var scale = total / sum;
+        for (var i = start; i < end; i++)
+        {
+            _molalities[_ladders.Species[i]] *= scale;
+        }
+
+        var excess = (above - below) / sum;
+        charge.AddProduct(total, chargeOfMost);
+        charge.Add(total * excess);
+        Rising += scale * (aboveSquares - (above * excess));
+        Falling += scale * (belowSquares + (below * excess));
+        Moving += scale * (aboveSquares + belowSquares);
+        FixedMagnitude += Math.Abs(chargeOfMost) * total;
+        IonicStrength += 0.5 * scale * squares;
+    }
+
+    private readonly int Fullest(int start, int end, double activity)
+    {
+        var fullest = start;
+        double share = 1;
         for (var i = start + 1; i < end; i++)
         {
-            share *= _ratios[i] * activity;
-            for (var gap = _ladders.Gap[i]; gap > 1; gap--)
+            share *= RatioToRungBelow(i, activity);
+            if (share > 1)
             {
-                share *= activity;
-            }
-
-            if (share is < tooSmall or > tooLarge)
-            {
-                return FillByLogarithms(start, end, activity);
-            }
-
-            _molalities[_ladders.Species[i]] = share;
-            if (share > largest)
-            {
-                largest = share;
-                most = i;
+                fullest = i;
+                share = 1;
             }
         }
 
-        return most;
+        return fullest;
     }
 
-    // The same where a product of ratios leaves the range of a double.
-    private readonly int FillByLogarithms(int start, int end, double activity)
+    private readonly double RatioToRungBelow(int rung, double activity)
     {
-        var log10Activity = Math.Log10(activity);
-        double log = 0, largest = 0;
-        var most = start;
-        for (var i = start; i < end; i++)
+        var ratio = _ratios[rung] * activity;
+        for (var gap = _ladders.Gap[rung]; gap > 1; gap--)
         {
-            if (i > start)
-            {
-                log += Math.Log10(_ratios[i]) + (_ladders.Gap[i] * log10Activity);
-            }
-
-            _molalities[_ladders.Species[i]] = log;
-            if (log > largest)
-            {
-                largest = log;
-                most = i;
-            }
+            ratio *= activity;
         }
 
-        for (var i = start; i < end; i++)
-        {
-            ref var share = ref _molalities[_ladders.Species[i]];
-            share = Math.Pow(10, share - largest);
-        }
-
-        return most;
+        return ratio;
     }
 }

@@ -8,6 +8,9 @@ namespace Lyonium.Equilibria;
 /// <remarks>A component with a single rung (a spectator) has nothing to speciate; it only adds to the fixed charge.</remarks>
 internal sealed class LadderSet
 {
+    // A ratio of constants must be a double; chemistry needs a tenth of this.
+    private const int MostDecades = 300;
+
     public LadderSet(Equilibrium equilibrium)
     {
         var rungs = equilibrium.Species
@@ -20,9 +23,11 @@ internal sealed class LadderSet
         var ladders = rungs.Where(one => one.Rungs.Length > 1).ToArray();
         Start = new int[ladders.Length + 1];
         Total = new double[ladders.Length];
+        Component = Array.ConvertAll(ladders, one => one.Component);
         var species = new List<int>();
         var charge = new List<int>();
         var gap = new List<int>();
+        var log10Ratio = new List<double>();
         var ratio = new List<double>();
         for (var i = 0; i < ladders.Length; i++)
         {
@@ -35,10 +40,17 @@ internal sealed class LadderSet
                     throw new ArgumentException($"Two rungs of component {ladders[i].Component} have the same protons.");
                 }
 
+                if (below is not null && !(Math.Abs(one.Log10K - below.Log10K) <= MostDecades))
+                {
+                    throw new ArgumentException(
+                        $"Two neighbouring rungs of component {ladders[i].Component} have constants more than {MostDecades} decades apart.");
+                }
+
                 species.Add(index + Equilibrium.WaterIons);
                 charge.Add(one.Charge);
                 gap.Add(below is null ? 0 : one.Protons - below.Protons);
-                ratio.Add(below is null ? 0 : one.Log10K - below.Log10K);
+                log10Ratio.Add(below is null ? 0 : one.Log10K - below.Log10K);
+                ratio.Add(below is null ? 0 : PowerOfDifference(one.Log10K, below.Log10K));
                 below = one;
             }
 
@@ -48,8 +60,8 @@ internal sealed class LadderSet
         Species = species.ToArray();
         Charge = charge.ToArray();
         Gap = gap.ToArray();
-        Log10Ratio = ratio.ToArray();
-        Ratio = Array.ConvertAll(Log10Ratio, log => Math.Pow(10, log));
+        Log10Ratio = log10Ratio.ToArray();
+        Ratio = ratio.ToArray();
 
         var fixedCharge = default(ExactSum);
         SpectatorSpecies = new int[rungs.Length - ladders.Length];
@@ -71,6 +83,9 @@ internal sealed class LadderSet
 
     /// <summary>Where each ladder's rungs start; one more entry than ladders.</summary>
     public int[] Start { get; }
+
+    /// <summary>The component of each ladder.</summary>
+    public int[] Component { get; }
 
     /// <summary>The total of each ladder, in mol/kg.</summary>
     public double[] Total { get; }
@@ -101,4 +116,15 @@ internal sealed class LadderSet
 
     /// <summary>Σ|z|m of the spectators, in mol/kg.</summary>
     public double SpectatorChargeMagnitude { get; }
+
+    // 10^(a − b), with what rounding drops of the difference.
+    private static double PowerOfDifference(double a, double b)
+    {
+        var difference = default(ExactSum);
+        difference.Add(a);
+        difference.Add(-b);
+        var rounded = difference.Value;
+        difference.Add(-rounded);
+        return Math.Pow(10, rounded) * (1 + (Math.Log(10) * difference.Value));
+    }
 }

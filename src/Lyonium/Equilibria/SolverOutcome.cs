@@ -70,12 +70,27 @@ public readonly record struct SolverOutcome
         init;
     }
 
+    /// <summary>The formula that the method used, in words and symbols; <see langword="null"/> where it solves the whole balance.</summary>
+    public string? Formula { get; init; }
+
     /// <summary>The estimates of a method that repeats itself; empty for others.</summary>
     public IReadOnlyList<Iterate> Iterates
     {
         get => field ?? [];
         init;
     }
+
+    /// <summary>An answer without a bracket.</summary>
+    /// <param name="pH">−log10 of the hydrogen-ion activity, molality scale.</param>
+    /// <returns>The outcome; say what was taken for granted with <c>with</c>.</returns>
+    public static SolverOutcome Answer(double pH) => new()
+    {
+        Status = SolverStatus.Solved,
+        PH = pH,
+        BracketLow = double.NaN,
+        BracketHigh = double.NaN,
+        InputResolution = double.NaN,
+    };
 
     /// <summary>An outcome without an answer.</summary>
     /// <param name="status">How the method ended; not <see cref="SolverStatus.Solved"/>.</param>

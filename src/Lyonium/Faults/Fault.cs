@@ -11,8 +11,14 @@ public sealed class Fault
     private const int LongestFound = 120;
     private const int LongestArgument = 500;
 
-    private Fault(FaultKind kind, string path, string found, IReadOnlyDictionary<string, string> arguments)
+    private Fault(
+        FaultKind kind,
+        string path,
+        string found,
+        IReadOnlyDictionary<string, string> arguments,
+        IReadOnlyList<(double PH, double Correction)> iterates)
     {
+        Iterates = iterates;
         Kind = kind;
         Path = path;
         Found = found;
@@ -33,6 +39,9 @@ public sealed class Fault
 
     /// <summary>What fills the placeholders of the texts, by name.</summary>
     public IReadOnlyDictionary<string, string> Arguments { get; }
+
+    /// <summary>The estimates of a method that did not settle, each with its correction; empty for other faults.</summary>
+    public IReadOnlyList<(double PH, double Correction)> Iterates { get; }
 
     /// <summary>What is wrong, in a sentence.</summary>
     public string Message => Fill(Kind.Message);
@@ -60,8 +69,15 @@ public sealed class Fault
             values[name] = Shown(value ?? "", LongestArgument);
         }
 
-        return new Fault(kind, Shown(path, LongestArgument), shown, values);
+        return new Fault(kind, Shown(path, LongestArgument), shown, values, []);
     }
+
+    /// <summary>The same fault with the estimates of a method that did not settle.</summary>
+    /// <param name="iterates">The estimates in pH, each with its correction.</param>
+    /// <returns>A new fault.</returns>
+    /// <exception cref="ArgumentNullException"><paramref name="iterates"/> is <see langword="null"/>.</exception>
+    public Fault WithIterates(IReadOnlyList<(double PH, double Correction)> iterates) =>
+        new(Kind, Path, Found, Arguments, iterates ?? throw new ArgumentNullException(nameof(iterates)));
 
     /// <summary>The fault on one line: code, place, message and remedy.</summary>
     /// <returns>One line of text.</returns>

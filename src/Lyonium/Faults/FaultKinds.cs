@@ -70,6 +70,10 @@ public static class FaultKinds
     public static FaultKind WrongType { get; } = new(
         "LYO0208", "wrong type", "Here {expected} is wanted, and {actual} was found.", "give {expected}");
 
+    /// <summary>A name that must be one of a few.</summary>
+    public static FaultKind NotAmongThese { get; } = new(
+        "LYO0209", "not among these", "'{found}' is not known here.", "use one of {known}");
+
     /// <summary>A substance that the table does not have.</summary>
     public static FaultKind UnknownSubstance { get; } = new(
         "LYO0301", "unknown substance", "'{found}' is not in the table.", "{suggestion}");
@@ -109,6 +113,10 @@ public static class FaultKinds
     /// <summary>A value of a table that cannot be right.</summary>
     public static FaultKind TableBadValue { get; } = new(
         "LYO0318", "bad value in the table", "'{found}' cannot stand here: {detail}.", "correct the value");
+
+    /// <summary>A family of a layer that ends in another base form than the one whose place it takes.</summary>
+    public static FaultKind TableChangesBase { get; } = new(
+        "LYO0319", "another base form", "The family '{family}' ends in {found}, and the one whose place it takes in {base}.", "end the forms in {base}, or give the family an id of its own");
 
     /// <summary>A recipe without parts.</summary>
     public static FaultKind EmptyRecipe { get; } = new(
@@ -150,13 +158,17 @@ public static class FaultKinds
     public static FaultKind TooManyParts { get; } = new(
         "LYO0410", "too many parts", "The recipe has {found} parts, and at most {limit} are read.", "split the recipe");
 
-    /// <summary>A recipe poured into a recipe.</summary>
-    public static FaultKind RecipeInRecipe { get; } = new(
-        "LYO0411", "recipe in a recipe", "A recipe poured into a recipe is not built yet.", "write the parts of the inner recipe here, scaled to what is poured");
+    /// <summary>More of a recipe than it makes.</summary>
+    public static FaultKind MoreThanTheRecipeMakes { get; } = new(
+        "LYO0411", "more than the recipe makes", "{found} is taken of a recipe that makes {makes}.", "take at most {makes}, or scale the recipe");
 
     /// <summary>Amounts so large that they overflow.</summary>
     public static FaultKind MixtureOverflows { get; } = new(
         "LYO0412", "amounts overflow", "The amounts add up to {found}, which no vessel holds.", "correct the amounts; at most 1e9 kg and 1e9 mol are taken, and molalities up to 1e6 mol/kg");
+
+    /// <summary>Recipes poured into each other over too many levels.</summary>
+    public static FaultKind NestedTooDeep { get; } = new(
+        "LYO0413", "nested too deep", "Recipes are poured into each other over {found} levels, and at most {limit} are taken.", "pour the parts of the innermost recipes themselves");
 
     /// <summary>A mixture at a temperature at which the constants do not hold yet.</summary>
     public static FaultKind TemperatureNotModelled { get; } = new(
@@ -202,11 +214,11 @@ public static class FaultKinds
     public static IReadOnlyList<FaultKind> All { get; } =
     [
         WrongDimension, NotAQuantity, DecimalComma, UnknownUnit, Negative, Zero, NotFinite, OutOfRange,
-        NotJson, TooLarge, WrongFormat, FormatTooNew, UnknownProperty, DuplicateProperty, MissingProperty, WrongType,
+        NotJson, TooLarge, WrongFormat, FormatTooNew, UnknownProperty, DuplicateProperty, MissingProperty, WrongType, NotAmongThese,
         UnknownSubstance, AmbiguousSubstance,
-        TableStepOutOfOrder, TableDuplicate, TableMissingSource, TableBadFormula, TableBadLadder, TableNotBalanced, TableUnknownFamily, TableBadValue,
+        TableStepOutOfOrder, TableDuplicate, TableMissingSource, TableBadFormula, TableBadLadder, TableNotBalanced, TableUnknownFamily, TableBadValue, TableChangesBase,
         EmptyRecipe, Contradictory, Incomplete, UnknownStock, DuplicateName, MarkBelowContents, NeedsDensity, StrongerThanPossible, NoWater,
-        TooManyParts, RecipeInRecipe, MixtureOverflows,
+        TooManyParts, MoreThanTheRecipeMakes, MixtureOverflows, NestedTooDeep,
         TemperatureNotModelled, NotInThisTable,
         CoupledSpecies, FixedActivity, MethodDoesNotApply, DidNotSettle, MethodFailed,
         FileNotFound, IsAFolder, CannotRead,

@@ -102,21 +102,21 @@ internal sealed class Doorway(Mixture mixture, IActivityModel model)
     private List<UsedConstant> Constants(Family[] families, InfiniteDilution infiniteDilution)
     {
         var constants = new List<UsedConstant>();
-        foreach (var step in families.SelectMany(family => family.Steps))
+        foreach (var (step, layer) in families.SelectMany(family => family.Steps.Select(step => (step, family.Layer))))
         {
-            constants.Add(new UsedConstant(step.Id, "pKa", step.PKa));
+            constants.Add(new UsedConstant(step.Id, "pKa", step.PKa, layer));
             if (step.PKa.IonicStrengthMolPerKg > 0)
             {
-                constants.Add(new UsedConstant(step.Id, "pKa at infinite dilution", infiniteDilution.Describe(step)));
+                constants.Add(new UsedConstant(step.Id, "pKa at infinite dilution", infiniteDilution.Describe(step), layer));
             }
         }
 
         constants.AddRange(WaterConstants.At(mixture.TemperatureK, mixture.Recipe.PreparedAtK));
         constants.AddRange(mixture.Parts.Where(part => part.TableDensity is not null)
             .GroupBy(part => part.Substance!.Id + NumberText.Shortest(part.TableDensity!.Value), StringComparer.Ordinal)
-            .Select(group => new UsedConstant(group.First().Substance!.Id, "density of the solution in kg/L", group.First().TableDensity!)));
+            .Select(group => new UsedConstant(group.First().Substance!.Id, "density of the solution in kg/L", group.First().TableDensity!, group.First().Substance!.Layer)));
         constants.AddRange(mixture.Amounts.Where(one => one.Substance.MolarVolumeMLPerMol is not null)
-            .Select(one => new UsedConstant(one.Substance.Id, "molar volume in solution in mL/mol", one.Substance.MolarVolumeMLPerMol!)));
+            .Select(one => new UsedConstant(one.Substance.Id, "molar volume in solution in mL/mol", one.Substance.MolarVolumeMLPerMol!, one.Substance.Layer)));
         return constants;
     }
 }

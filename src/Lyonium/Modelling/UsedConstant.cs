@@ -7,4 +7,5 @@ namespace Lyonium.Modelling;
 /// <param name="Id">What it belongs to: a step (<c>citrate:1</c>), a substance, or <c>water</c>.</param>
 /// <param name="Quantity">What it is, such as <c>pKa</c>, with its unit where it has one.</param>
 /// <param name="Value">The value, its conditions and its source.</param>
-public sealed record UsedConstant(string Id, string Quantity, SourcedValue Value);
+/// <param name="Layer">The user's table that it comes from; <see langword="null"/> for the library's own.</param>
+public sealed record UsedConstant(string Id, string Quantity, SourcedValue Value, string? Layer);

@@ -13,9 +13,9 @@ internal static class WaterConstants
 
     public static IEnumerable<UsedConstant> At(double temperatureK, double preparedAtK) =>
     [
-        new("water", "pKw", Of(WaterIonization.PKw(temperatureK), WaterIonization.Source, Known.ReadAndMemory, temperatureK)),
-        new("water", "Debye-Hückel A in (kg/mol)^½", Of(DebyeHuckelSlopes.At(temperatureK).A, Slopes, Known.Derived, temperatureK)),
-        new("water", "density in kg/L", Of(WaterDensity.KgPerL(preparedAtK), WaterDensity.Source, Known.ReadAndMemory, preparedAtK)),
+        new("water", "pKw", Of(WaterIonization.PKw(temperatureK), WaterIonization.Source, Known.ReadAndMemory, temperatureK), null),
+        new("water", "Debye-Hückel A in (kg/mol)^½", Of(DebyeHuckelSlopes.At(temperatureK).A, Slopes, Known.Derived, temperatureK), null),
+        new("water", "density in kg/L", Of(WaterDensity.KgPerL(preparedAtK), WaterDensity.Source, Known.ReadAndMemory, preparedAtK), null),
     ];
 
     private static SourcedValue Of(double value, Source source, Known known, double temperatureK) =>

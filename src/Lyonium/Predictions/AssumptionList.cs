@@ -23,6 +23,11 @@ internal sealed class AssumptionList(SolvedMixture answer, Predictor predictor, 
 
     private IEnumerable<Assumption> OfTheMethod()
     {
+        if (answer.Outcome.Formula is { } formula)
+        {
+            yield return new Assumption("formula", WholeMixture, null, null, Held: true, formula);
+        }
+
         foreach (var one in answer.Outcome.Assumptions)
         {
             var of = one.Component < 0 ? WholeMixture : answer.Modelled.Families[one.Component].Name;

@@ -12,17 +12,17 @@ namespace Lyonium.Predictions;
 /// <remarks>Immutable; safe to share between threads.</remarks>
 public sealed class Prediction
 {
-    internal Prediction(Mixture mixture, string method, string activityModel, double pH, Speciation speciation)
+    private readonly SolvedMixture _answer;
+
+    internal Prediction(SolvedMixture answer, string method, string activityModel)
     {
-        Mixture = mixture;
+        _answer = answer;
         Method = method;
         ActivityModel = activityModel;
-        PH = pH;
-        IonicStrengthMolPerKg = speciation.IonicStrengthMolPerKg;
     }
 
     /// <summary>What was mixed.</summary>
-    public Mixture Mixture { get; }
+    public Mixture Mixture => _answer.Modelled.Mixture;
 
     /// <summary>The recipe it was mixed from.</summary>
     public Recipe Recipe => Mixture.Recipe;
@@ -34,7 +34,7 @@ public sealed class Prediction
     public string ActivityModel { get; }
 
     /// <summary>−log10 of the hydrogen-ion activity, molality scale.</summary>
-    public double PH { get; }
+    public double PH => _answer.Outcome.PH;
 
     /// <summary>p[H]: −log10 of the hydrogen-ion concentration in mol/L, at the volume of preparation.</summary>
     public required double PHydrogenConcentration { get; init; }
@@ -58,7 +58,7 @@ public sealed class Prediction
     }
 
     /// <summary>The ionic strength, in mol/kg.</summary>
-    public double IonicStrengthMolPerKg { get; }
+    public double IonicStrengthMolPerKg => _answer.Speciation.IonicStrengthMolPerKg;
 
     /// <summary>The ionic strength.</summary>
     public Molality IonicStrength => Molality.FromMolesPerKilogram(IonicStrengthMolPerKg);
@@ -69,14 +69,21 @@ public sealed class Prediction
     /// <summary>What was taken for granted.</summary>
     public required IReadOnlyList<Assumption> Assumptions { get; init; }
 
+    /// <summary>The formula of a short-cut, in words and symbols; <see langword="null"/> where the whole balance was solved.</summary>
+    public string? Formula => _answer.Outcome.Formula;
+
     /// <summary>The estimates of a method that repeats itself; empty for others.</summary>
-    public required IReadOnlyList<Iterate> Iterates { get; init; }
+    public IReadOnlyList<Iterate> Iterates => _answer.Outcome.Iterates;
 
     /// <summary>What can hurt someone who makes the mixture.</summary>
     public required IReadOnlyList<Caution> Cautions { get; init; }
 
     /// <summary>What the answer rests on.</summary>
     public required Evidence Evidence { get; init; }
+
+    /// <summary>Retraces the method step by step.</summary>
+    /// <returns>The worked steps.</returns>
+    public Working Work() => new WorkingBuilder(_answer).Build();
 
     /// <summary>The reported pH in words.</summary>
     /// <returns>Such as <c>pH 2.35</c>.</returns>

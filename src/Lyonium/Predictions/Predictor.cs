@@ -1,5 +1,6 @@
 using System;
 using System.Collections.Generic;
+using System.Linq;
 using Lyonium.Activity;
 using Lyonium.Equilibria;
 using Lyonium.Faults;
@@ -92,6 +93,40 @@ public sealed class Predictor
         return new Attempt<Prediction>(Describe(answer, assumptions));
     }
 
+    /// <summary>Predicts a recipe with every method of the library side by side, and with this predictor's own.</summary>
+    /// <param name="recipe">The recipe.</param>
+    /// <param name="tolerance">How far from the exact answer still counts as right, in pH, above 0.</param>
+    /// <returns>The comparison, or every fault of the recipe.</returns>
+    /// <exception cref="ArgumentNullException"><paramref name="recipe"/> is <see langword="null"/>.</exception>
+    /// <exception cref="ArgumentOutOfRangeException">The tolerance is not a number above 0.</exception>
+    public Attempt<Comparison> TryCompare(Recipe recipe, double tolerance = Comparison.DefaultTolerance)
+    {
+        if (!(tolerance > 0) || double.IsInfinity(tolerance))
+        {
+            throw new ArgumentOutOfRangeException(nameof(tolerance), tolerance, "A tolerance is a number above 0.");
+        }
+
+        var mixture = Mixture.TryPrepare(recipe ?? throw new ArgumentNullException(nameof(recipe)), Table);
+        if (!mixture.Success)
+        {
+            return new Attempt<Comparison>(mixture.Faults);
+        }
+
+        var exact = With(new ExactSolver()).TryPredict(mixture.Value);
+        if (!exact.Success)
+        {
+            return new Attempt<Comparison>(exact.Faults);
+        }
+
+        var others = Methods.All.Append(Method)
+            .GroupBy(method => method.Name, StringComparer.Ordinal)
+            .Select(group => group.Last())
+            .Where(method => method is not ExactSolver)
+            .Select(method => ComparisonRow.Of(method.Name, With(method).TryPredict(mixture.Value), exact.Value, tolerance));
+        var rows = others.Prepend(ComparisonRow.Of(exact.Value.Method, exact, exact.Value, tolerance)).ToArray();
+        return new Attempt<Comparison>(new Comparison(recipe, ActivityModel.Name, tolerance, rows));
+    }
+
     private Attempt<SolvedMixture> TrySolve(Mixture mixture) => SolvedMixture.TrySolve(mixture, Method, ActivityModel);
 
     // What an error in estimated solute volumes does to the answer is found by answering again.
@@ -110,12 +145,11 @@ public sealed class Predictor
     {
         var mixture = answer.Modelled.Mixture;
         var species = answer.Species();
-        return new Prediction(mixture, Method.Name, ActivityModel.Name, answer.Outcome.PH, answer.Speciation)
+        return new Prediction(answer, Method.Name, ActivityModel.Name)
         {
             PHydrogenConcentration = -Math.Log10(species[Equilibrium.HydrogenIon].ConcentrationMolPerL),
             Species = species,
             Assumptions = assumptions,
-            Iterates = answer.Outcome.Iterates,
             Cautions = CautionTable.Default.For(mixture),
             Evidence = new Evidence
             {

@@ -39,7 +39,7 @@ internal sealed class SolvedMixture
             var outcome = method.Solve(modelled.Equilibrium, model);
             if (outcome.Status != SolverStatus.Solved)
             {
-                return Refuse(KindOf(outcome.Status), outcome.Reason ?? "no reason was given", method, model);
+                return Refuse(KindOf(outcome.Status), outcome.Reason ?? "no reason was given", method, model, outcome.Iterates);
             }
 
             if (double.IsNaN(outcome.PH) || double.IsInfinity(outcome.PH))
@@ -104,6 +104,10 @@ internal sealed class SolvedMixture
         _ => FaultKinds.DidNotSettle,
     };
 
-    private static Attempt<SolvedMixture> Refuse(FaultKind kind, string found, ISolver method, IActivityModel model) =>
-        new([Fault.Of(kind, "$", found, ("method", method.Name), ("model", model.Name))]);
+    private static Attempt<SolvedMixture> Refuse(
+        FaultKind kind, string found, ISolver method, IActivityModel model, IReadOnlyList<Iterate>? iterates = null)
+    {
+        var fault = Fault.Of(kind, "$", found, ("method", method.Name), ("model", model.Name));
+        return new Attempt<SolvedMixture>([fault.WithIterates((iterates ?? []).Select(one => (one.PH, one.Correction)).ToArray())]);
+    }
 }

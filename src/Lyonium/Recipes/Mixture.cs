@@ -38,7 +38,10 @@ public sealed class Mixture
     /// <summary>The table that its substances come from.</summary>
     public SubstanceTable Table { get; }
 
-    /// <summary>What each part of the recipe brought, in the order of the recipe.</summary>
+    /// <summary>
+    /// What each part of the recipe brought, in the order of the recipe; the parts of a recipe inside it follow that part, and are counted
+    /// in it.
+    /// </summary>
     public IReadOnlyList<PreparedPart> Parts { get; }
 
     /// <summary>The amount of each substance, by id, whatever the order of pouring.</summary>
@@ -77,8 +80,9 @@ public sealed class Mixture
     /// <param name="table">A table that has its substances.</param>
     /// <returns>The mixture, or every fault.</returns>
     public static Attempt<Mixture> TryPrepare(Recipe recipe, SubstanceTable table) =>
-        new Preparation(
-            recipe ?? throw new ArgumentNullException(nameof(recipe)), table ?? throw new ArgumentNullException(nameof(table))).Run();
+        TryPrepare(recipe ?? throw new ArgumentNullException(nameof(recipe)), table ?? throw new ArgumentNullException(nameof(table)), "$");
+
+    internal static Attempt<Mixture> TryPrepare(Recipe recipe, SubstanceTable table, string root) => new Preparation(recipe, table, root).Run();
 
     /// <summary>The same mixture with another mass of water: what an error in the water does is found with it.</summary>
     internal Mixture WithWaterKg(double waterKg) => new(Recipe, Table, Parts, waterKg, VolumeL, MassKg, EstimatedWaterKg);

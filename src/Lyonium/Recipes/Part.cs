@@ -16,7 +16,7 @@ public abstract class Part : IEquatable<Part>
     /// <summary>The id of the part in its recipe; <see langword="null"/> where it has none.</summary>
     public string? Id { get; }
 
-    /// <summary>How much is taken: a volume, a mass, or an amount of substance.</summary>
+    /// <summary>How much is taken: a volume, a mass, an amount of substance, or (of a recipe) the whole as 100 %.</summary>
     public Measure Taken { get; }
 
     /// <inheritdoc/>
@@ -77,4 +77,21 @@ public sealed class WaterPart : Part
     }
 
     private protected override bool HoldsTheSame(Part other) => true;
+}
+
+/// <summary>A volume or mass of what another recipe makes, or all of it.</summary>
+public sealed class RecipePart : Part
+{
+    internal RecipePart(Recipe recipe, Measure taken, string? id)
+        : base(taken, id) => Recipe = recipe;
+
+    /// <summary>The recipe that is poured.</summary>
+    public Recipe Recipe { get; }
+
+    /// <summary>Whether all that the recipe makes is poured.</summary>
+    public bool IsAll => Taken.Dimension == Dimension.MassFraction;
+
+    internal static Measure All { get; } = Measure.Parse("100 %", Dimension.MassFraction);
+
+    private protected override bool HoldsTheSame(Part other) => Recipe.Equals(((RecipePart)other).Recipe);
 }

@@ -11,12 +11,15 @@ namespace Lyonium.Recipes;
 /// <summary>Turns a recipe into a mixture: adds up what each part brings, and fills up to the mark.</summary>
 /// <param name="recipe">The recipe.</param>
 /// <param name="table">A table that has its substances.</param>
+/// <param name="root">Where the recipe stands: <c>$</c>, or the place of a recipe inside another.</param>
 /// <param name="pathOf">Where a part of the recipe stands in the input; its own place where it is left out.</param>
-internal sealed class Preparation(Recipe recipe, SubstanceTable table, Func<int, string>? pathOf = null)
+internal sealed class Preparation(Recipe recipe, SubstanceTable table, string root, Func<int, string>? pathOf = null)
 {
     private const double MostKg = 1e9;
     private const double MostMol = 1e9;
     private const double MostMolPerKg = 1e6;
+
+    private static readonly string MostParts = Recipe.MostParts.ToString(System.Globalization.CultureInfo.InvariantCulture);
 
     private readonly FaultList _faults = new();
     private readonly double _waterDensity = WaterDensity.KgPerL(recipe.PreparedAtK);
@@ -29,10 +32,11 @@ internal sealed class Preparation(Recipe recipe, SubstanceTable table, Func<int,
             return _faults.Attempt<Mixture>(null);
         }
 
-        var water = parts.Sum(part => part.WaterKg);
-        var volume = parts.Sum(part => part.VolumeL);
-        var mass = parts.Sum(part => part.MassKg);
-        var estimated = parts.Sum(part => part.EstimatedWaterKg);
+        double Sum(Func<PreparedPart, double> of) => parts.Where(part => part.Inside is null).Sum(of);
+        var water = Sum(part => part.WaterKg);
+        var volume = Sum(part => part.VolumeL);
+        var mass = Sum(part => part.MassKg);
+        var estimated = Sum(part => part.EstimatedWaterKg);
         if (recipe.MakeUpTo is { } mark)
         {
             var fill = Fill(mark, volume, mass);
@@ -40,7 +44,7 @@ internal sealed class Preparation(Recipe recipe, SubstanceTable table, Func<int,
             mass += fill;
             var isVolume = mark.Dimension == Dimension.Volume;
             volume = isVolume ? mark.Computed : volume + (fill / _waterDensity);
-            estimated += isVolume ? parts.Sum(part => part.EstimatedVolumeL) * _waterDensity : 0;
+            estimated += isVolume ? Sum(part => part.EstimatedVolumeL) * _waterDensity : 0;
         }
 
         CheckTotals(parts, water, mass);
@@ -61,7 +65,18 @@ internal sealed class Preparation(Recipe recipe, SubstanceTable table, Func<int,
         var parts = new List<PreparedPart>(recipe.Parts.Count);
         for (var i = 0; i < recipe.Parts.Count; i++)
         {
-            if (Prepare(recipe.Parts[i], pathOf is null ? RecipeDraft.PathOf(i) : pathOf(i)) is { } prepared)
+            var path = pathOf is null ? RecipeDraft.PathOf(root, i) : pathOf(i);
+            if (recipe.Parts[i] is RecipePart inner)
+            {
+                parts.AddRange(PrepareRecipe(inner, path));
+                if (parts.Count > Recipe.MostParts)
+                {
+                    // Recipes that pour each other twice double at every level.
+                    _faults.Add(FaultKinds.TooManyParts, root + ".parts", "more than " + MostParts, ("limit", MostParts));
+                    return parts;
+                }
+            }
+            else if (Prepare(recipe.Parts[i], path) is { } prepared)
             {
                 parts.Add(prepared);
             }
@@ -130,6 +145,42 @@ internal sealed class Preparation(Recipe recipe, SubstanceTable table, Func<int,
         };
     }
 
+    // A volume is measured at this recipe's temperature of preparation; it holds the mass that it would hold of water.
+    private IEnumerable<PreparedPart> PrepareRecipe(RecipePart part, string path)
+    {
+        var attempt = Mixture.TryPrepare(part.Recipe, table, path + ".recipe");
+        if (!attempt.Success)
+        {
+            _faults.AddRange(attempt.Faults);
+            return [];
+        }
+
+        var whole = attempt.Value;
+        var volume = whole.VolumeL * WaterDensity.KgPerL(part.Recipe.PreparedAtK) / _waterDensity;
+        var share = part.Taken.Dimension switch
+        {
+            Dimension.Volume => part.Taken.Computed / volume,
+            Dimension.Mass => part.Taken.Computed / whole.MassKg,
+            _ => part.Taken.Computed,
+        };
+        if (share > 1 + 1e-12)
+        {
+            var makes = part.Taken.Dimension == Dimension.Volume ? Rounded(volume) + " L" : Rounded(whole.MassKg) + " kg";
+            _faults.Add(FaultKinds.MoreThanTheRecipeMakes, path, part.Taken.ToString(), ("makes", makes));
+            return [];
+        }
+
+        var poured = new PreparedPart
+        {
+            Part = part,
+            WaterKg = whole.WaterKg,
+            VolumeL = volume,
+            MassKg = whole.MassKg,
+            EstimatedWaterKg = whole.EstimatedWaterKg,
+        };
+        return whole.Parts.Select(inner => inner.Scaled(share, part)).Prepend(poured.Scaled(share, part) with { Inside = null });
+    }
+
     private double Fill(Measure mark, double volume, double mass)
     {
         var isVolume = mark.Dimension == Dimension.Volume;
@@ -138,7 +189,7 @@ internal sealed class Preparation(Recipe recipe, SubstanceTable table, Func<int,
         if (missing < -1e-12 * contents)
         {
             var unit = isVolume ? " L" : " kg";
-            _faults.Add(FaultKinds.MarkBelowContents, "$.makeUpTo", mark.ToString(), ("contents", Rounded(contents) + unit));
+            _faults.Add(FaultKinds.MarkBelowContents, root + ".makeUpTo", mark.ToString(), ("contents", Rounded(contents) + unit));
         }
 
         return missing <= 0 ? 0 : isVolume ? missing * _waterDensity : missing;
@@ -149,11 +200,11 @@ internal sealed class Preparation(Recipe recipe, SubstanceTable table, Func<int,
         var amount = parts.Sum(part => part.AmountMol);
         if (!(mass <= MostKg && amount <= MostMol && !(water > 0 && amount / water > MostMolPerKg)))
         {
-            _faults.Add(FaultKinds.MixtureOverflows, "$.parts", $"{Rounded(mass)} kg, {Rounded(amount)} mol and {Rounded(water)} kg of water");
+            _faults.Add(FaultKinds.MixtureOverflows, root + ".parts", $"{Rounded(mass)} kg, {Rounded(amount)} mol and {Rounded(water)} kg of water");
         }
         else if (!(water > 0))
         {
-            _faults.Add(FaultKinds.NoWater, "$.parts", Rounded(water) + " kg of water");
+            _faults.Add(FaultKinds.NoWater, root + ".parts", Rounded(water) + " kg of water");
         }
     }
 

@@ -13,7 +13,7 @@ namespace Lyonium.Recipes;
 /// </remarks>
 public sealed class RecipeBuilder
 {
-    private readonly RecipeDraft _draft = new();
+    private readonly RecipeDraft _draft = new(new FaultList(), "$");
 
     internal RecipeBuilder(string name) => _draft.Name = name;
 
@@ -63,6 +63,29 @@ public sealed class RecipeBuilder
     /// <param name="stock">The stock.</param>
     /// <returns>This builder.</returns>
     public RecipeBuilder Pour(Mass mass, Stock stock) => Pour(UnitsNetDoor.From(mass), stock);
+
+    /// <summary>Pours a volume (or a mass) of what another recipe makes.</summary>
+    /// <param name="volumeOrMass">How much, as UCUM text; zero or more, and no more than the recipe makes.</param>
+    /// <param name="recipe">The recipe.</param>
+    /// <returns>This builder.</returns>
+    public RecipeBuilder Pour(string volumeOrMass, Recipe recipe) => Pour(ReadVolumeOrMass(volumeOrMass), recipe);
+
+    /// <summary>Pours a volume of what another recipe makes.</summary>
+    /// <param name="volume">How much, zero or more, and no more than the recipe makes.</param>
+    /// <param name="recipe">The recipe.</param>
+    /// <returns>This builder.</returns>
+    public RecipeBuilder Pour(Volume volume, Recipe recipe) => Pour(UnitsNetDoor.From(volume), recipe);
+
+    /// <summary>Pours a mass of what another recipe makes.</summary>
+    /// <param name="mass">How much, zero or more, and no more than the recipe makes.</param>
+    /// <param name="recipe">The recipe.</param>
+    /// <returns>This builder.</returns>
+    public RecipeBuilder Pour(Mass mass, Recipe recipe) => Pour(UnitsNetDoor.From(mass), recipe);
+
+    /// <summary>Pours all that another recipe makes.</summary>
+    /// <param name="recipe">The recipe.</param>
+    /// <returns>This builder.</returns>
+    public RecipeBuilder PourAll(Recipe recipe) => Pour(RecipePart.All, recipe);
 
     /// <summary>Pours a volume (or a mass) of water.</summary>
     /// <param name="volumeOrMass">How much, as UCUM text; zero or more.</param>
@@ -184,6 +207,12 @@ public sealed class RecipeBuilder
         _ = stock ?? throw new ArgumentNullException(nameof(stock));
         _draft.AddStock(stock);
         _draft.AddSolution(stock, taken, id: null);
+        return this;
+    }
+
+    private RecipeBuilder Pour(Measure? taken, Recipe recipe)
+    {
+        _draft.AddRecipe(recipe ?? throw new ArgumentNullException(nameof(recipe)), taken, id: null);
         return this;
     }
 

@@ -29,7 +29,20 @@ internal sealed class RecipeDraft
     private Measure? _preparedAt;
     private Measure? _makeUpTo;
 
-    public RecipeDraft(FaultList? faults = null) => Faults = faults ?? new FaultList();
+    private readonly string _root;
+
+    // What was refused elsewhere in a document does not refuse a recipe inside it.
+    private readonly int _faultsBefore;
+
+    /// <summary>Starts a draft.</summary>
+    /// <param name="faults">Where faults are told.</param>
+    /// <param name="root">Where the recipe stands: <c>$</c>, or the place of a recipe inside another.</param>
+    public RecipeDraft(FaultList faults, string root)
+    {
+        Faults = faults;
+        _root = root;
+        _faultsBefore = faults.Count;
+    }
 
     public FaultList Faults { get; }
 
@@ -40,28 +53,28 @@ internal sealed class RecipeDraft
     public string? Notes { get; set; }
 
     /// <summary>Where the next part will stand.</summary>
-    public string NextPath => PathOf(_positions);
+    public string NextPath => PathOf(_root, _positions);
 
-    public static string PathOf(int position) => "$.parts[" + position.ToString(CultureInfo.InvariantCulture) + "]";
+    public static string PathOf(string root, int position) => root + ".parts[" + position.ToString(CultureInfo.InvariantCulture) + "]";
 
-    public void SetTemperature(Measure? temperature) => _temperature = Between0And100(temperature, "$.temperature");
+    public void SetTemperature(Measure? temperature) => _temperature = Between0And100(temperature, _root + ".temperature");
 
-    public void SetPreparedAt(Measure? temperature) => _preparedAt = Between0And100(temperature, "$.preparedAt");
+    public void SetPreparedAt(Measure? temperature) => _preparedAt = Between0And100(temperature, _root + ".preparedAt");
 
     public void SetMakeUpTo(Measure? mark)
     {
-        if (mark is null || MeasureReader.Check(mark, "$.makeUpTo", mark.ToString(), Faults) is null)
+        if (mark is null || MeasureReader.Check(mark, _root + ".makeUpTo", mark.ToString(), Faults) is null)
         {
             return;
         }
 
         if (mark.Computed == 0)
         {
-            Faults.Add(FaultKinds.Zero, "$.makeUpTo", mark.ToString(), MeasureReader.Expected(mark.Dimension));
+            Faults.Add(FaultKinds.Zero, _root + ".makeUpTo", mark.ToString(), MeasureReader.Expected(mark.Dimension));
         }
         else if (_makeUpTo is not null)
         {
-            Faults.Add(FaultKinds.Contradictory, "$.makeUpTo", $"the marks {_makeUpTo} and {mark}");
+            Faults.Add(FaultKinds.Contradictory, _root + ".makeUpTo", $"the marks {_makeUpTo} and {mark}");
         }
 
         _makeUpTo = mark;
@@ -81,7 +94,7 @@ internal sealed class RecipeDraft
         }
         else if (!same.Equals(stock))
         {
-            Faults.Add(FaultKinds.DuplicateName, "$.stocks", stock.Name);
+            Faults.Add(FaultKinds.DuplicateName, _root + ".stocks", stock.Name);
         }
     }
 
@@ -105,7 +118,7 @@ internal sealed class RecipeDraft
     {
         if (substance is not null && WaterName.Is(substance))
         {
-            AddWaterByMass(taken, purity, id);
+            AddWaterAsSubstance(taken, purity, id);
             return;
         }
 
@@ -119,7 +132,7 @@ internal sealed class RecipeDraft
     }
 
     // Water is taken by volume or mass, and has no purity.
-    private void AddWaterByMass(Measure? taken, Measure? purity, string? id)
+    private void AddWaterAsSubstance(Measure? taken, Measure? purity, string? id)
     {
         if (purity is not null)
         {
@@ -148,6 +161,27 @@ internal sealed class RecipeDraft
         _positions++;
     }
 
+    /// <summary>Adds a recipe, or a volume or mass of it.</summary>
+    public void AddRecipe(Recipe? recipe, Measure? taken, string? id)
+    {
+        if (recipe?.Nesting >= Recipe.MostNesting)
+        {
+            Faults.Add(
+                FaultKinds.NestedTooDeep,
+                NextPath + ".recipe",
+                (recipe.Nesting + 1).ToString(CultureInfo.InvariantCulture),
+                ("limit", Recipe.MostNesting.ToString(CultureInfo.InvariantCulture)));
+            recipe = null;
+        }
+
+        if (recipe is not null && Checked(taken) is { } sound)
+        {
+            AddPart(new RecipePart(recipe, sound, id));
+        }
+
+        _positions++;
+    }
+
     /// <summary>Counts a part that was refused before it could be added.</summary>
     public void SkipPart() => _positions++;
 
@@ -155,13 +189,13 @@ internal sealed class RecipeDraft
     {
         if (_positions == 0)
         {
-            Faults.Add(FaultKinds.EmptyRecipe, "$.parts", "");
+            Faults.Add(FaultKinds.EmptyRecipe, _root + ".parts", "");
         }
         else if (_positions > Recipe.MostParts)
         {
             Faults.Add(
                 FaultKinds.TooManyParts,
-                "$.parts",
+                _root + ".parts",
                 _positions.ToString(CultureInfo.InvariantCulture),
                 ("limit", Recipe.MostParts.ToString(CultureInfo.InvariantCulture)));
             return Faults.Attempt<Recipe>(null);
@@ -169,21 +203,23 @@ internal sealed class RecipeDraft
 
         CheckIds();
         var resolver = new SubstanceResolver(table, Faults);
-        var stocks = _stocks.Select(stock => resolver.Resolve(stock, "$.stocks" + PathStep.Of(stock.Name!))).ToArray();
-        var parts = _parts.Select((part, index) => resolver.Resolve(part, PathOf(_positionOf[index]))).ToArray();
-        if (Faults.Any)
+        var stocks = _stocks.Select(stock => resolver.Resolve(stock, _root + ".stocks" + PathStep.Of(stock.Name!))).ToArray();
+        var parts = _parts.Select((part, index) => resolver.Resolve(part, PathOf(_root, _positionOf[index]))).ToArray();
+        if (HasFaults)
         {
             // The parts that stand tell their own faults too, so that all are told at once.
             var sound = Enumerable.Range(0, parts.Length).Where(index => IsResolved(parts[index], table)).ToArray();
             var soundParts = Array.AsReadOnly(sound.Select(index => parts[index]).ToArray());
-            Faults.AddRange(new Preparation(Product(stocks, soundParts), table, index => PathOf(_positionOf[sound[index]])).FaultsOfParts());
+            Faults.AddRange(new Preparation(Product(stocks, soundParts), table, _root, index => PathOf(_root, _positionOf[sound[index]])).FaultsOfParts());
             return Faults.Attempt<Recipe>(null);
         }
 
         var recipe = Product(stocks, Array.AsReadOnly(parts));
-        Faults.AddRange(Mixture.TryPrepare(recipe, table).Faults);
-        return Faults.Attempt(recipe);
+        Faults.AddRange(Mixture.TryPrepare(recipe, table, _root).Faults);
+        return HasFaults ? Faults.Attempt<Recipe>(null) : new Attempt<Recipe>(recipe);
     }
+
+    private bool HasFaults => Faults.Count > _faultsBefore;
 
     private static bool IsResolved(Part part, SubstanceTable table) => part switch
     {
@@ -208,6 +244,7 @@ internal sealed class RecipeDraft
     {
         Dimension.Mass => "mass",
         Dimension.Amount => "amount",
+        Dimension.MassFraction => "recipe",
         _ => "volume",
     };
 
@@ -234,11 +271,11 @@ internal sealed class RecipeDraft
 
     private void CheckIds()
     {
-        CheckId(Id, "$.id");
+        CheckId(Id, _root + ".id");
         var taken = new HashSet<string>(StringComparer.Ordinal);
         for (var i = 0; i < _parts.Count; i++)
         {
-            var path = PathOf(_positionOf[i]) + ".id";
+            var path = PathOf(_root, _positionOf[i]) + ".id";
             CheckId(_parts[i].Id, path);
             if (_parts[i].Id is { Length: > 0 } id && !taken.Add(id))
             {

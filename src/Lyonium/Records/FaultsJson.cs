@@ -19,7 +19,8 @@ public static class FaultsJson
         _ = faults ?? throw new ArgumentNullException(nameof(faults));
         var document = new FaultsDocument(
             "lyonium-faults/1",
-            faults.Select(one => new FaultEntry(one.Code, one.Path, one.Found, one.Message, one.Remedy)).ToArray());
+            faults.Select(one => new FaultEntry(one.Code, one.Path, one.Found, one.Message, one.Remedy)).ToArray(),
+            faults.FirstOrDefault(one => one.Iterates.Count > 0)?.Iterates.Select(one => new IterateEntry(one.PH, one.Correction)).ToArray());
         return JsonSerializer.Serialize(document, ContractJson.Context.FaultsDocument);
     }
 }

@@ -13,11 +13,14 @@ namespace Lyonium.Records;
 /// <summary>Reads the JSON of a recipe into a draft, which checks it as it checks one written in code.</summary>
 internal sealed class RecipeReader(JsonPlace root, SubstanceTable table, FaultList faults)
 {
-    private readonly RecipeDraft _draft = new(faults);
+    private readonly RecipeDraft _draft = new(faults, root.Path);
     private readonly Dictionary<string, Stock?> _stocks = new(StringComparer.Ordinal);
     private string? _knownStocks;
 
-    public Attempt<Recipe> Read()
+    public Attempt<Recipe> Read() => faults.Attempt(ReadInner());
+
+    /// <summary>The recipe, or <see langword="null"/> with its faults told.</summary>
+    private Recipe? ReadInner()
     {
         var properties = root.Properties("format", "id", "name", "temperature", "preparedAt", "stocks", "parts", "makeUpTo", "notes");
         _draft.Id = Optional(properties, "id")?.Text();
@@ -28,7 +31,7 @@ internal sealed class RecipeReader(JsonPlace root, SubstanceTable table, FaultLi
         ReadStocks(Optional(properties, "stocks"));
         if (!ReadParts(root.Need(properties, "parts")))
         {
-            return faults.Attempt<Recipe>(null);
+            return null;
         }
 
         if (Optional(properties, "makeUpTo") is { } mark)
@@ -36,7 +39,8 @@ internal sealed class RecipeReader(JsonPlace root, SubstanceTable table, FaultLi
             _draft.SetMakeUpTo(mark.Measure(mark.MeasuredDimension() == Dimension.Mass ? Dimension.Mass : Dimension.Volume));
         }
 
-        return _draft.Build(table);
+        var attempt = _draft.Build(table);
+        return attempt.Success ? attempt.Value : null;
     }
 
     private static JsonPlace? Optional(IReadOnlyDictionary<string, JsonPlace> properties, string name) =>
@@ -137,15 +141,23 @@ internal sealed class RecipeReader(JsonPlace root, SubstanceTable table, FaultLi
         {
             ReadSubstance(place, properties, substance, id);
         }
+        else if (what == "recipe")
+        {
+            ReadPouredRecipe(place, properties, id);
+        }
         else
         {
-            if (what == "recipe")
-            {
-                faults.Add(FaultKinds.RecipeInRecipe, properties["recipe"].Path, "");
-            }
-
             _draft.SkipPart();
         }
+    }
+
+    private void ReadPouredRecipe(JsonPlace place, IReadOnlyDictionary<string, JsonPlace> properties, string? id)
+    {
+        Refuse(place, properties, "recipe", "concentration", "molality", "massFraction", "density", "amount", "purity");
+        var inner = properties["recipe"];
+        var isSound = DocumentFormat.Check(inner, RecipeJson.FormatName, RecipeJson.FormatVersion);
+        var taken = properties.ContainsKey("volume") || properties.ContainsKey("mass") ? ReadVolumeOrMass(place, properties) : RecipePart.All;
+        _draft.AddRecipe(isSound ? new RecipeReader(inner, table, faults).ReadInner() : null, taken, id);
     }
 
     private void ReadPouredStock(JsonPlace place, IReadOnlyDictionary<string, JsonPlace> properties, string? id)

@@ -60,12 +60,20 @@ internal static class RecipeWriter
             case SubstancePart pure:
                 writer.WriteString("substance", pure.Substance);
                 break;
+            case RecipePart inner:
+                writer.WritePropertyName("recipe");
+                Write(writer, inner.Recipe);
+                break;
             default:
                 writer.WriteString("substance", "water");
                 break;
         }
 
-        WriteMeasure(writer, RecipeDraft.TakenProperty(part.Taken.Dimension), part.Taken);
+        if (part is not RecipePart { IsAll: true })
+        {
+            WriteMeasure(writer, RecipeDraft.TakenProperty(part.Taken.Dimension), part.Taken);
+        }
+
         WriteMeasure(writer, "purity", (part as SubstancePart)?.Purity);
         writer.WriteEndObject();
     }

@@ -8,6 +8,7 @@ namespace Lyonium.Records;
 [JsonSourceGenerationOptions(GenerationMode = JsonSourceGenerationMode.Metadata)]
 [JsonSerializable(typeof(RecordDocument))]
 [JsonSerializable(typeof(FaultsDocument))]
+[JsonSerializable(typeof(ComparisonDocument))]
 internal sealed partial class RecordContext : JsonSerializerContext;
 
 /// <summary>The context as the contract wants it written: camel case, no nulls, formulas and signs as they are.</summary>

@@ -26,7 +26,7 @@ internal sealed record LayerEntry(string Name, string Edition, string Sha256);
 
 internal sealed record TableEntry(string Edition, string Sha256, IReadOnlyList<LayerEntry> Layers);
 
-internal sealed record ConstantEntry(string Id, string Quantity, double Value, string? At, string Source, string Known);
+internal sealed record ConstantEntry(string Id, string Quantity, double Value, string? At, string Source, string Known, string? Layer);
 
 internal sealed record EvidenceEntry(
     SoftwareEntry Software,
@@ -58,4 +58,16 @@ internal sealed record RecordDocument(
 
 internal sealed record FaultEntry(string Code, string Path, string Found, string Message, string Remedy);
 
-internal sealed record FaultsDocument(string Format, IReadOnlyList<FaultEntry> Faults);
+internal sealed record FaultsDocument(string Format, IReadOnlyList<FaultEntry> Faults, IReadOnlyList<IterateEntry>? Iterates);
+
+internal sealed record ComparisonRowEntry(
+    string Method,
+    [property: JsonPropertyName("pH"), JsonIgnore(Condition = JsonIgnoreCondition.Never)] double? PH,
+    double? Deviation,
+    bool? WithinTolerance,
+    string? Reason,
+    IReadOnlyList<AssumptionEntry> Assumptions,
+    IReadOnlyList<IterateEntry> Iterates);
+
+internal sealed record ComparisonDocument(
+    string Format, string? Id, string ActivityModel, double Tolerance, IReadOnlyList<ComparisonRowEntry> Rows);

@@ -35,8 +35,8 @@ public static class RecordJson
         new NumberWithUnit(prediction.Mixture.WaterKg, "kg"),
         TemperatureOf(prediction),
         prediction.Species.Select(Describe).ToArray(),
-        prediction.Assumptions.Select(one => new AssumptionEntry(one.Code, one.Of, Finite(one.Figure), one.Limit, one.Held, one.Basis)).ToArray(),
-        prediction.Iterates.Select(one => new IterateEntry(one.PH, one.Correction)).ToArray(),
+        prediction.Assumptions.Select(EntryOf.Assumption).ToArray(),
+        prediction.Iterates.Select(EntryOf.Iterate).ToArray(),
         prediction.Cautions.Select(Describe).ToArray(),
         Describe(prediction.Evidence),
         prediction.Recipe.Notes);
@@ -73,11 +73,8 @@ public static class RecordJson
         double.IsNaN(evidence.BracketLow) ? null : new List<double> { evidence.BracketLow, evidence.BracketHigh },
         evidence.Evaluations,
         evidence.Residual,
-        Finite(evidence.InputResolution));
+        EntryOf.Finite(evidence.InputResolution));
 
     private static ConstantEntry Describe(UsedConstant one) => new(
-        one.Id, one.Quantity, one.Value.Value, one.Value.Conditions, one.Value.Source.Citation, one.Value.KnownAs);
-
-    private static double? Finite(double? value) =>
-        value is double number && !double.IsNaN(number) && !double.IsInfinity(number) ? number : null;
+        one.Id, one.Quantity, one.Value.Value, one.Value.Conditions, one.Value.Source.Citation, one.Value.KnownAs, one.Layer);
 }

@@ -13,8 +13,8 @@ namespace Lyonium.Solvers;
 /// quadratic equation that is left; where that step leaves the bracket, the bracket's geometric mean is taken.
 /// </para>
 /// <para>
-/// The bracket is returned as two pH values at which the balance was found to have opposite signs, a few last digits apart. The solve
-/// allocates nothing. Stateless and thread-safe.
+/// The bracket is returned as two pH values at which the balance has opposite signs, each larger than rounding could have turned, a few
+/// last digits apart. The solve allocates nothing. Stateless and thread-safe.
 /// </para>
 /// </remarks>
 public sealed class ExactSolver : ISolver
@@ -23,6 +23,7 @@ public sealed class ExactSolver : ISolver
     private const double HighestPH = 70;
     private const double WidestBracket = 1e-9;
     private const int MostEvaluations = 400;
+    private const double LastDigit = 2.220446049250313e-16;
 
     /// <inheritdoc/>
     public string Name => "exact";
@@ -82,6 +83,9 @@ public sealed class ExactSolver : ISolver
             _settled = true;
         }
 
+        // By how much the charge falls for each unit of pH, activity coefficients held.
+        private readonly double Slope => Math.Log(10) * (_balance.Rising + _balance.Falling);
+
         public SolverOutcome Run()
         {
             var pH = -Math.Log10(FindZero());
@@ -93,7 +97,7 @@ public sealed class ExactSolver : ISolver
             var low = Math.Pow(10, -HighestPH);
             var high = Math.Pow(10, -LowestPH);
             var activity = 1e-7;
-            double lastStep = double.NaN, lastMove = double.NaN;
+            double lastStep = 1, lastMove = double.NaN;
             while (_settled && _evaluations < MostEvaluations)
             {
                 var charge = ChargeAt(activity);
@@ -106,16 +110,17 @@ public sealed class ExactSolver : ISolver
                     low = activity;
                 }
 
-                // The error that is left shrinks at least as fast as the steps do.
+                // The slope is exact but for activity coefficients that move: each error is then about the square of the one before.
                 var step = Math.Log(Factor(charge));
                 var rate = Math.Min(1, Math.Abs(step / lastStep));
-                if (Math.Abs(step) <= 1e-15 || Math.Abs(step) * rate <= 1e-16)
+                var shrinks = Math.Max(Math.Abs(step), _balance.GammasMove ? rate : rate * rate);
+                var move = _balance.GammasMove ? Secant(step, lastStep, lastMove) : step;
+                var next = activity * Math.Exp(move);
+                if (Math.Abs(step) * shrinks <= 2 * _balance.RelativeNoise)
                 {
-                    return activity * Math.Exp(step);
+                    return next;
                 }
 
-                var move = Secant(step, lastStep, lastMove);
-                var next = activity * Math.Exp(move);
                 if (!(next > low && next < high))
                 {
                     next = Math.Sqrt(low) * Math.Sqrt(high);
@@ -134,7 +139,7 @@ public sealed class ExactSolver : ISolver
         private static double Secant(double step, double lastStep, double lastMove)
         {
             var factor = lastMove / (lastStep - step);
-            return Math.Abs(step) < 0.1 && factor is > 0.5 and < 2 ? step * factor : step;
+            return Math.Abs(step) < 0.3 && factor is > 0.1 and < 10 ? step * factor : step;
         }
 
         // The factor t on the activity that makes Rising · t + constant − Falling / t zero.
@@ -152,29 +157,21 @@ public sealed class ExactSolver : ISolver
             return _balance.Charge;
         }
 
-        private double ChargeAtPH(double pH) => ChargeAt(Math.Pow(10, -pH));
-
         private SolverOutcome Certify(double pH)
         {
-            var digit = Math.Max(1, Math.Abs(pH)) * 2.220446049250313e-16;
-            double low = pH - digit, high = pH + digit, reach = digit;
-            var lowCharge = ChargeAtPH(low);
-            while (_settled && lowCharge <= 0 && reach < 1)
+            // The first guess is as narrow as rounding lets the signs be certain; it nearly always holds.
+            var narrow = (1.5 * Math.Max(1, Math.Abs(pH)) * LastDigit) + (1.5 * _balance.Noise / Slope);
+            double low = pH, high = pH, lowCharge = 0, highCharge = 0;
+            for (var reach = narrow; lowCharge <= 0 && reach < 1; reach *= 4)
             {
-                high = low;
-                reach *= 4;
                 low -= reach;
-                lowCharge = ChargeAtPH(low);
+                lowCharge = CertainChargeAtPH(low);
             }
 
-            var highCharge = ChargeAtPH(high);
-            while (_settled && highCharge >= 0 && reach < 1)
+            for (var reach = narrow; highCharge >= 0 && reach < 1; reach *= 4)
             {
-                low = high;
-                lowCharge = highCharge;
-                reach *= 4;
                 high += reach;
-                highCharge = ChargeAtPH(high);
+                highCharge = CertainChargeAtPH(high);
             }
 
             if (!_settled)
@@ -187,10 +184,10 @@ public sealed class ExactSolver : ISolver
                 return NotSettled("the charge balance has no zero that a bracket can hold");
             }
 
-            while (high - low > 4 * digit && _evaluations < MostEvaluations)
+            while (high - low > 2 * narrow && _evaluations < MostEvaluations)
             {
                 var middle = low + (0.5 * (high - low));
-                var charge = ChargeAtPH(middle);
+                var charge = CertainChargeAtPH(middle);
                 if (charge > 0)
                 {
                     low = middle;
@@ -210,15 +207,17 @@ public sealed class ExactSolver : ISolver
             return Answer(low, high, lowCharge - highCharge);
         }
 
-        private SolverOutcome Answer(double low, double high, double jump)
+        // Zero where rounding could have turned the sign.
+        private double CertainChargeAtPH(double pH)
         {
-            var pH = low + (0.5 * (high - low));
-            _ = ChargeAtPH(pH);
-            var slope = Math.Log(10) * (_balance.Rising + _balance.Falling);
-            var resolution = 1.1102230246251565e-16 * _balance.FixedMagnitude / slope;
+            var charge = ChargeAt(Math.Pow(10, -pH));
+            return Math.Abs(charge) > _balance.Noise ? charge : 0;
+        }
 
+        private readonly SolverOutcome Answer(double low, double high, double jump)
+        {
             // Beyond its range an activity model can make the balance jump; a jump is not a zero.
-            if (!_settled || high - low > WidestBracket || jump > (1e-6 * slope) + (1e3 * slope * (high - low)))
+            if (!_settled || high - low > WidestBracket || jump > 1e3 * Slope * (high - low))
             {
                 return NotSettled("the charge balance jumps over zero, so that no pH fulfils it");
             }
@@ -226,11 +225,11 @@ public sealed class ExactSolver : ISolver
             return new SolverOutcome
             {
                 Status = SolverStatus.Solved,
-                PH = pH,
+                PH = low + (0.5 * (high - low)),
                 BracketLow = low,
                 BracketHigh = high,
                 Evaluations = _evaluations,
-                InputResolution = resolution,
+                InputResolution = 0.5 * LastDigit * _balance.FixedMagnitude / Slope,
             };
         }
 

@@ -21,6 +21,9 @@ public sealed record Family
     /// <summary>What else a reader should know; empty where there is nothing.</summary>
     public string Note { get; init; } = "";
 
+    /// <summary>The name of the user's table that it comes from; <see langword="null"/> for the library's own.</summary>
+    public string? Layer { get; init; }
+
     /// <summary>The form that has given up every proton the table knows of.</summary>
     public ChemicalFormula Base => Forms[Forms.Count - 1];
 

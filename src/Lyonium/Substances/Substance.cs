@@ -1,4 +1,5 @@
 using System.Collections.Generic;
+using System.Linq;
 using Lyonium.Provenance;
 
 namespace Lyonium.Substances;
@@ -45,4 +46,13 @@ public sealed record Substance
 
     /// <summary>The mass of crystal water per amount of substance, in g/mol.</summary>
     public required double CrystalWaterGPerMol { get; init; }
+
+    /// <summary>The name of the user's table that it comes from; <see langword="null"/> for the library's own.</summary>
+    public string? Layer { get; init; }
+
+    /// <summary>The same substance bringing the families of another table.</summary>
+    internal Substance With(IReadOnlyList<Family> families) => this with
+    {
+        Brings = Brings.Select(one => one with { Family = families.First(family => family.Id == one.Family.Id) }).ToArray(),
+    };
 }

@@ -14,13 +14,14 @@ internal sealed class SubstanceReader
     private readonly SourcedValueReader _values;
     private readonly Dictionary<string, Family> _families;
     private readonly Dictionary<string, double> _weights;
-    private readonly Dictionary<string, string> _owners = new(StringComparer.Ordinal);
+    private readonly TakenNames _names;
 
-    public SubstanceReader(SourcedValueReader values, IReadOnlyList<Family> families, IReadOnlyList<AtomicWeight> weights)
+    public SubstanceReader(SourcedValueReader values, IReadOnlyList<Family> families, IReadOnlyList<AtomicWeight> weights, TakenNames names)
     {
+        _names = names;
         _values = values;
         _families = families.ToDictionary(family => family.Id, StringComparer.Ordinal);
-        _weights = weights.GroupBy(one => one.Symbol, StringComparer.Ordinal).ToDictionary(one => one.Key, one => one.First().Weight.Value, StringComparer.Ordinal);
+        _weights = weights.ToDictionary(one => one.Symbol, one => one.Weight.Value, StringComparer.Ordinal);
     }
 
     public IReadOnlyList<Substance> Read(JsonPlace? list) =>
@@ -117,26 +118,15 @@ internal sealed class SubstanceReader
 
     private void TakeNames(JsonPlace place, string id, string name, IReadOnlyList<string> synonyms)
     {
-        var own = new HashSet<string>(StringComparer.Ordinal);
-        foreach (var one in synonyms.Concat([name, id]))
+        foreach (var one in synonyms.Concat([name, id]).GroupBy(NameFolding.Fold, StringComparer.Ordinal).Select(group => group.First()))
         {
-            var folded = NameFolding.Fold(one);
-            if (!own.Add(folded))
-            {
-                continue;
-            }
-
-            if (folded.Length == 0)
+            if (NameFolding.Fold(one).Length == 0)
             {
                 place.Faults.Add(FaultKinds.TableBadValue, place.Path, one, ("detail", "a name has letters"));
             }
-            else if (_owners.TryGetValue(folded, out var owner))
+            else if (_names.Take(one, id) is { } owner)
             {
                 place.Faults.Add(FaultKinds.TableDuplicate, place.Path, one, ("owner", owner));
-            }
-            else
-            {
-                _owners.Add(folded, id);
             }
         }
     }

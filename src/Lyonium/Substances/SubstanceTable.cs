@@ -79,6 +79,19 @@ public sealed class SubstanceTable
     public static Attempt<SubstanceTable> TryRead(Stream json) =>
         SubstanceTableReader.Read(json ?? throw new ArgumentNullException(nameof(json)));
 
+    /// <summary>Lays a user's own table over this one.</summary>
+    /// <remarks>
+    /// A family, substance, source or element of the layer takes the place of the one with the same id here; the rest is added. A family that
+    /// takes another's place must end in the same base form. Predictions name the layer of each constant.
+    /// </remarks>
+    /// <param name="name">The name by which records speak of the layer.</param>
+    /// <param name="json">The layer as <c>lyonium-table/1</c>, at most 4 MiB; sections that it does not need may be left out.</param>
+    /// <returns>The layered table, or every fault.</returns>
+    /// <exception cref="ArgumentNullException">A parameter is <see langword="null"/>.</exception>
+    public Attempt<SubstanceTable> TryLayer(string name, Stream json) =>
+        SubstanceTableReader.ReadLayer(
+            json ?? throw new ArgumentNullException(nameof(json)), name ?? throw new ArgumentNullException(nameof(name)), this);
+
     /// <summary>Finds a substance by id, name or synonym (in any case) or by formula (case-sensitive).</summary>
     /// <param name="nameOrFormula">What to look for.</param>
     /// <returns>The substance; or the fault: unknown, with the nearest names, or ambiguous, with the candidates.</returns>

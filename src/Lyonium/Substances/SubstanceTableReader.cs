@@ -1,6 +1,7 @@
 using System;
 using System.Collections.Generic;
 using System.IO;
+using System.Linq;
 using Lyonium.Documents;
 using Lyonium.Faults;
 using Lyonium.Provenance;
@@ -12,6 +13,8 @@ internal static class SubstanceTableReader
 {
     private const int MostBytes = 4 * 1024 * 1024;
     private const string Resource = "Lyonium.Data.table.json";
+
+    private static readonly string[] Sections = ["format", "edition", "sources", "elements", "families", "substances"];
 
     public static SubstanceTable ReadEmbedded()
     {
@@ -30,16 +33,80 @@ internal static class SubstanceTableReader
             return faults.Attempt<SubstanceTable>(null);
         }
 
-        var properties = root.Properties("format", "edition", "sources", "elements", "families", "substances");
+        var properties = root.Properties(Sections);
         var edition = TableText.Read(root, properties, "edition");
         var values = new SourcedValueReader(ReadSources(root.Need(properties, "sources"), faults));
         var weights = ReadElements(root.Need(properties, "elements"), values);
         var families = new FamilyReader(values).Read(root.Need(properties, "families"));
-        var substances = new SubstanceReader(values, families, weights).Read(root.Need(properties, "substances"));
+        var substances = new SubstanceReader(values, families, weights, new TakenNames()).Read(root.Need(properties, "substances"));
         return faults.Any || edition is null
             ? faults.Attempt<SubstanceTable>(null)
             : new Attempt<SubstanceTable>(new SubstanceTable(
                 new TableIdentity(edition, Fingerprint.Of(copy.ToArray()), []), values.Sources, weights, families, substances));
+    }
+
+    /// <summary>Reads a user's own table and lays it over another: what it has replaces what is below, the rest stays.</summary>
+    public static Attempt<SubstanceTable> ReadLayer(Stream stream, string name, SubstanceTable below)
+    {
+        var faults = new FaultList();
+        using var copy = new MemoryStream();
+        var root = JsonDocumentReader.Open(stream, MostBytes, faults, copy);
+        if (root is null || !DocumentFormat.Check(root, "lyonium-table", "1"))
+        {
+            return faults.Attempt<SubstanceTable>(null);
+        }
+
+        var properties = root.Properties(Sections);
+        var edition = TableText.Read(root, properties, "edition");
+        var ownSources = ReadSources(Optional(properties, "sources"), faults);
+        var values = new SourcedValueReader(Over(below.Sources, ownSources, source => source.Key));
+        var weights = Over(below.AtomicWeights, ReadElements(Optional(properties, "elements"), values), one => one.Symbol);
+        var ownFamilies = new FamilyReader(values).Read(Optional(properties, "families")).Select(one => one with { Layer = name }).ToArray();
+        CheckBases(ownFamilies, below, root);
+        var families = Over(below.Families, ownFamilies, one => one.Id);
+        var kept = below.Substances.Select(one => one.With(families)).ToArray();
+        var ownIds = new HashSet<string>(Ids(Optional(properties, "substances")), StringComparer.Ordinal);
+        var names = new TakenNames(kept.Where(one => !ownIds.Contains(one.Id)));
+        var own = new SubstanceReader(values, families, weights, names).Read(Optional(properties, "substances")).Select(one => one with { Layer = name }).ToArray();
+        if (faults.Any || edition is null)
+        {
+            return faults.Attempt<SubstanceTable>(null);
+        }
+
+        var layer = new TableLayer(name, edition, Fingerprint.Of(copy.ToArray()));
+        var identity = below.Identity with { Layers = [.. below.Identity.Layers, layer] };
+        return new Attempt<SubstanceTable>(
+            new SubstanceTable(identity, values.Sources, weights, families, Over(kept, own, one => one.Id)));
+    }
+
+    private static JsonPlace? Optional(IReadOnlyDictionary<string, JsonPlace> properties, string name) =>
+        properties.TryGetValue(name, out var place) ? place : null;
+
+    private static IEnumerable<string> Ids(JsonPlace? list) =>
+        Items(list).Where(place => place.IsObject).Select(place => place.Find("id")).Where(id => id is { IsText: true }).Select(id => id!.Text()!);
+
+    // What lies above takes the place of what has the same key below; the rest is added at the end.
+    private static T[] Over<T>(IReadOnlyList<T> below, IReadOnlyList<T> above, Func<T, string> key)
+    {
+        var byKey = above.ToDictionary(key, StringComparer.Ordinal);
+        var replaced = below.Select(one => byKey.TryGetValue(key(one), out var other) ? other : one).ToArray();
+        var there = new HashSet<string>(below.Select(key), StringComparer.Ordinal);
+        return [.. replaced, .. above.Where(one => !there.Contains(key(one)))];
+    }
+
+    // Substances below bring base forms; a family that replaces another must end in the same one.
+    private static void CheckBases(IEnumerable<Family> own, SubstanceTable below, JsonPlace root)
+    {
+        foreach (var family in own)
+        {
+            var other = below.Families.FirstOrDefault(one => string.Equals(one.Id, family.Id, StringComparison.Ordinal));
+            if (other is not null
+                && (other.Base.Charge != family.Base.Charge || !other.Base.Composition.SequenceEqual(family.Base.Composition)))
+            {
+                root.Faults.Add(
+                    FaultKinds.TableChangesBase, root.Path + ".families", family.Base.Text, ("family", family.Id), ("base", other.Base.Text));
+            }
+        }
     }
 
     private static IReadOnlyList<JsonPlace> Items(JsonPlace? place) => place?.Items() ?? [];

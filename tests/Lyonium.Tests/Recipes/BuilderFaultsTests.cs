@@ -144,7 +144,7 @@ public sealed class BuilderFaultsTests
         var builder = Recipe.Named("x");
         Assert.Throws<ArgumentNullException>(() => builder.WithId(null!));
         Assert.Throws<ArgumentNullException>(() => builder.At(null!));
-        Assert.Throws<ArgumentNullException>(() => builder.Pour("1 L", null!));
+        Assert.Throws<ArgumentNullException>(() => builder.Pour("1 L", (Stock)null!));
         Assert.Throws<ArgumentNullException>(() => builder.Pour(null!, Acid));
         Assert.Throws<ArgumentNullException>(() => builder.Weigh(null!, "NaCl"));
         Assert.Throws<ArgumentNullException>(() => builder.Weigh("1 g", null!));

@@ -8,36 +8,39 @@ using Lyonium.Substances;
 namespace Lyonium.Tool;
 
 /// <summary>Opens what a command was given as a file; a hyphen is standard input.</summary>
-internal static class RecipeFile
+internal static class InputFile
 {
-    public static Attempt<Recipe> Read(string file, SubstanceTable table)
+    public static Attempt<Recipe> ReadRecipe(string file, SubstanceTable table) => Read(file, stream => RecipeJson.TryRead(stream, table));
+
+    public static Attempt<T> Read<T>(string file, Func<Stream, Attempt<T>> read)
+        where T : class
     {
         try
         {
             if (file == "-")
             {
                 using var input = Console.OpenStandardInput();
-                return RecipeJson.TryRead(input, table);
+                return read(input);
             }
 
             if (Directory.Exists(file))
             {
-                return Refuse(FaultKinds.IsAFolder, file);
+                return Refuse<T>(FaultKinds.IsAFolder, file);
             }
 
             using var stream = File.OpenRead(file);
-            return RecipeJson.TryRead(stream, table);
+            return read(stream);
         }
         catch (Exception e) when (e is FileNotFoundException or DirectoryNotFoundException)
         {
-            return Refuse(FaultKinds.FileNotFound, file);
+            return Refuse<T>(FaultKinds.FileNotFound, file);
         }
         catch (Exception e) when (e is IOException or UnauthorizedAccessException or ArgumentException or NotSupportedException)
         {
-            return Refuse(FaultKinds.CannotRead, file, ("detail", e.Message));
+            return Refuse<T>(FaultKinds.CannotRead, file, ("detail", e.Message));
         }
     }
 
-    private static Attempt<Recipe> Refuse(FaultKind kind, string file, params (string Name, string Value)[] arguments) =>
-        new([Fault.Of(kind, "$", file, arguments)]);
+    private static Attempt<T> Refuse<T>(FaultKind kind, string file, params (string Name, string Value)[] arguments)
+        where T : class => new([Fault.Of(kind, "$", file, arguments)]);
 }

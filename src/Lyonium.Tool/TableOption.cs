@@ -1,0 +1,16 @@
+using System.CommandLine;
+using System.IO;
+using Lyonium.Faults;
+using Lyonium.Substances;
+
+namespace Lyonium.Tool;
+
+/// <summary>The option that lays a user's own table over the library's.</summary>
+internal static class TableOption
+{
+    public static Option<string?> Create() => new("--table") { Description = "a table of your own (lyonium-table/1), laid over the library's" };
+
+    public static Attempt<SubstanceTable> Open(string? file) => file is null
+        ? new Attempt<SubstanceTable>(SubstanceTable.Default)
+        : InputFile.Read(file, stream => SubstanceTable.Default.TryLayer(Path.GetFileName(file), stream));
+}

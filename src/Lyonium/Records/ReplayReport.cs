@@ -1,0 +1,23 @@
+using System.Collections.Generic;
+using Lyonium.Predictions;
+
+namespace Lyonium.Records;
+
+/// <summary>What came of replaying a record.</summary>
+/// <remarks>Immutable; safe to share between threads.</remarks>
+/// <param name="IsBitIdentical">Whether the pH is the same double.</param>
+/// <param name="IsSameBuild">Whether version, target and processor architecture are those that made the record.</param>
+/// <param name="Differences">What differs beyond the bound, in the order of the record; empty where everything agrees.</param>
+/// <param name="Prediction">The new prediction.</param>
+public sealed record ReplayReport(
+    bool IsBitIdentical, bool IsSameBuild, IReadOnlyList<ReplayDifference> Differences, Prediction Prediction)
+{
+    /// <summary>Whether the answer and its evidence agree, within the bound.</summary>
+    public bool Agrees => Differences.Count == 0;
+}
+
+/// <summary>One thing that differs between a record and its replay.</summary>
+/// <param name="Path">Where it stands in the record, as a JSON path.</param>
+/// <param name="Recorded">What the record says; empty where it says nothing.</param>
+/// <param name="Replayed">What the replay gives; empty where it gives nothing.</param>
+public sealed record ReplayDifference(string Path, string Recorded, string Replayed);

@@ -1,0 +1,43 @@
+using System;
+using System.Globalization;
+using Lyonium.Water;
+using Xunit;
+using Xunit.Abstractions;
+
+namespace Lyonium.PublishedValues;
+
+/// <summary>
+/// Debye–Hückel slopes on the molality basis, computed elsewhere from the density of IAPWS SR6-08, the permittivity of IAPWS R8-97 and the
+/// CODATA 2018 constants; derived.
+/// </summary>
+public sealed class DerivedSlopesTests(ITestOutputHelper output)
+{
+    private const string File = "iapws-slopes-derived.csv";
+    private const string Reason = "half of the fifth decimal, and no more for doubles";
+
+    [Fact]
+    public void A_From0To100Celsius_AgreesWithDerivedTable() =>
+        SlopeComparison.OfA(output, "derived from IAPWS", Reason, File, isMolar: false, _ => 0.50001e-5).AssertHolds(21);
+
+    [Fact]
+    public void B_From0To100Celsius_AgreesWithDerivedTable() =>
+        SlopeComparison.OfB(output, "derived from IAPWS", Reason, File, isMolar: false, _ => 0.50001e-5).AssertHolds(21);
+
+    // A = 1.8248e6 (rho / (eps T)^3)^(1/2) and B = 50.29 (rho / (eps T))^(1/2) per angstrom: the textbook forms, R. A. Robinson and
+    // R. H. Stokes, Electrolyte Solutions (memory), with the factors of present constants; 0.03 % for factors of four and five figures.
+    [Theory]
+    [InlineData(273.15)]
+    [InlineData(298.15)]
+    [InlineData(373.15)]
+    public void At_AnyTemperature_AgreesWithTheTextbookForm(double kelvin)
+    {
+        var density = WaterDensity.KgPerL(kelvin);
+        var product = WaterPermittivity.Relative(kelvin, density) * kelvin;
+        var slopes = DebyeHuckelSlopes.At(kelvin);
+        var a = 1.8248e6 * Math.Sqrt(density / (product * product * product));
+        var b = 50.29 * Math.Sqrt(density / product);
+        output.WriteLine(string.Create(CultureInfo.InvariantCulture, $"{kelvin} K  A {slopes.A:F5} ({a:F5})  B {slopes.B:F5} ({b:F5})"));
+        Assert.InRange(slopes.A / a, 0.9997, 1.0003);
+        Assert.InRange(slopes.B / b, 0.9997, 1.0003);
+    }
+}
