@@ -10,7 +10,7 @@ internal sealed class ComparisonText(Comparison comparison)
 {
     public void Print(IAnsiConsole console)
     {
-        console.MarkupLineInterpolated($"[bold]{comparison.Recipe.Name ?? "Recipe"}[/]{(comparison.Recipe.Id is null ? "" : "  " + comparison.Recipe.Id)}");
+        console.MarkupLineInterpolated($"[bold]{PlainText.Of(comparison.Recipe.Name ?? "Recipe")}[/]{(comparison.Recipe.Id is null ? "" : "  " + PlainText.Of(comparison.Recipe.Id))}");
         console.MarkupLineInterpolated(
             CultureInfo.InvariantCulture, $"every method against the exact one, tolerance {comparison.Tolerance}, activity coefficients {comparison.ActivityModel}");
         console.WriteLine();

@@ -46,7 +46,7 @@ internal sealed class PredictionText(Prediction prediction)
     {
         var recipe = prediction.Recipe;
         var celsius = NumberFormat.Short(recipe.TemperatureK - 273.15);
-        console.MarkupLineInterpolated($"[bold]{recipe.Name ?? "Recipe"}[/]{(recipe.Id is null ? "" : "  " + recipe.Id)}");
+        console.MarkupLineInterpolated($"[bold]{PlainText.Of(recipe.Name ?? "Recipe")}[/]{(recipe.Id is null ? "" : "  " + PlainText.Of(recipe.Id))}");
         console.MarkupLineInterpolated($"[bold green]pH {prediction.Reported}[/] at {celsius} °C");
         var brief = new Grid().AddColumn(new GridColumn { Padding = new Padding(2, 0, 2, 0) }).AddColumn();
         Row(brief, "pH", prediction.PH.ToString("F4", CultureInfo.InvariantCulture) + "  (activity, molality scale)");
@@ -85,9 +85,9 @@ internal sealed class PredictionText(Prediction prediction)
 
     private static string Describe(PreparedPart part) => part.Part switch
     {
-        RecipePart { Recipe.Name: { } name } => name,
+        RecipePart { Recipe.Name: { } name } => PlainText.Of(name),
         RecipePart => "another recipe",
-        SolutionPart { Stock: var stock } => part.Substance!.Name + " " + stock.Strength + (stock.Name is null ? "" : $"  ({stock.Name})"),
+        SolutionPart { Stock: var stock } => part.Substance!.Name + " " + stock.Strength + (stock.Name is null ? "" : $"  ({PlainText.Of(stock.Name)})"),
         SubstancePart { Purity: { } purity } => part.Substance!.Name + ", " + purity,
         SubstancePart => part.Substance!.Name,
         _ => "water",

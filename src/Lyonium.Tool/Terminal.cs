@@ -27,7 +27,7 @@ internal static class Terminal
         using var lines = new StringReader(page.ToString());
         while (lines.ReadLine() is { } line)
         {
-            Console.Out.WriteLine(line.TrimEnd());
+            Console.Out.WriteLine(PlainText.Of(line).TrimEnd());
         }
     }
 

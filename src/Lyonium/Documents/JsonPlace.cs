@@ -51,8 +51,14 @@ internal sealed class JsonPlace
                 continue;
             }
 
+            var isUnknown = known.Length > 0 && !known.Contains(name, StringComparer.Ordinal);
+            if (isUnknown && _faults.IsFull)
+            {
+                continue;
+            }
+
             var path = Path + PathStep.Of(name);
-            if (known.Length > 0 && !known.Contains(name, StringComparer.Ordinal))
+            if (isUnknown)
             {
                 _faults.Add(FaultKinds.UnknownProperty, path, name, ("known", string.Join(", ", known)));
             }

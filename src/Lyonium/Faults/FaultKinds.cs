@@ -166,6 +166,10 @@ public static class FaultKinds
     public static FaultKind MixtureOverflows { get; } = new(
         "LYO0412", "amounts overflow", "The amounts add up to {found}, which no vessel holds.", "correct the amounts; at most 1e9 kg and 1e9 mol are taken, and molalities up to 1e6 mol/kg");
 
+    /// <summary>Recipes poured into each other over too many levels.</summary>
+    public static FaultKind NestedTooDeep { get; } = new(
+        "LYO0413", "nested too deep", "Recipes are poured into each other over {found} levels, and at most {limit} are taken.", "pour the parts of the innermost recipes themselves");
+
     /// <summary>A mixture at a temperature at which the constants do not hold yet.</summary>
     public static FaultKind TemperatureNotModelled { get; } = new(
         "LYO0501", "temperature not modelled", "The pH is asked for at {found}, and the constants hold at 25 Cel: their change with temperature is not built yet.", "ask for 25 Cel");
@@ -214,7 +218,7 @@ public static class FaultKinds
         UnknownSubstance, AmbiguousSubstance,
         TableStepOutOfOrder, TableDuplicate, TableMissingSource, TableBadFormula, TableBadLadder, TableNotBalanced, TableUnknownFamily, TableBadValue, TableChangesBase,
         EmptyRecipe, Contradictory, Incomplete, UnknownStock, DuplicateName, MarkBelowContents, NeedsDensity, StrongerThanPossible, NoWater,
-        TooManyParts, MoreThanTheRecipeMakes, MixtureOverflows,
+        TooManyParts, MoreThanTheRecipeMakes, MixtureOverflows, NestedTooDeep,
         TemperatureNotModelled, NotInThisTable,
         CoupledSpecies, FixedActivity, MethodDoesNotApply, DidNotSettle, MethodFailed,
         FileNotFound, IsAFolder, CannotRead,

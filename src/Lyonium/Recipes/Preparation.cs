@@ -19,6 +19,8 @@ internal sealed class Preparation(Recipe recipe, SubstanceTable table, string ro
     private const double MostMol = 1e9;
     private const double MostMolPerKg = 1e6;
 
+    private static readonly string MostParts = Recipe.MostParts.ToString(System.Globalization.CultureInfo.InvariantCulture);
+
     private readonly FaultList _faults = new();
     private readonly double _waterDensity = WaterDensity.KgPerL(recipe.PreparedAtK);
 
@@ -67,6 +69,12 @@ internal sealed class Preparation(Recipe recipe, SubstanceTable table, string ro
             if (recipe.Parts[i] is RecipePart inner)
             {
                 parts.AddRange(PrepareRecipe(inner, path));
+                if (parts.Count > Recipe.MostParts)
+                {
+                    // Recipes that pour each other twice double at every level.
+                    _faults.Add(FaultKinds.TooManyParts, root + ".parts", "more than " + MostParts, ("limit", MostParts));
+                    return parts;
+                }
             }
             else if (Prepare(recipe.Parts[i], path) is { } prepared)
             {

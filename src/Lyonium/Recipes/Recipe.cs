@@ -14,6 +14,9 @@ public sealed class Recipe : IEquatable<Recipe>
     /// <summary>The most parts that a recipe may have.</summary>
     public const int MostParts = 10_000;
 
+    /// <summary>The most levels over which recipes may be poured into each other.</summary>
+    public const int MostNesting = 16;
+
     internal const double DefaultTemperatureK = 298.15;
     internal const double DefaultPreparedAtK = 293.15;
 
@@ -35,7 +38,14 @@ public sealed class Recipe : IEquatable<Recipe>
         Parts = parts;
         MakeUpTo = makeUpTo;
         Notes = notes;
+        foreach (var part in parts.OfType<RecipePart>())
+        {
+            Nesting = Math.Max(Nesting, 1 + part.Recipe.Nesting);
+        }
     }
+
+    /// <summary>Over how many levels recipes are poured into this one.</summary>
+    internal int Nesting { get; }
 
     /// <summary>The host's id for it; <see langword="null"/> where it has none.</summary>
     public string? Id { get; }

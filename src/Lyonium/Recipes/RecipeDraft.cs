@@ -31,6 +31,9 @@ internal sealed class RecipeDraft
 
     private readonly string _root;
 
+    // What was refused elsewhere in a document does not refuse a recipe inside it.
+    private readonly int _faultsBefore;
+
     /// <summary>Starts a draft.</summary>
     /// <param name="faults">Where faults are told.</param>
     /// <param name="root">Where the recipe stands: <c>$</c>, or the place of a recipe inside another.</param>
@@ -38,6 +41,7 @@ internal sealed class RecipeDraft
     {
         Faults = faults;
         _root = root;
+        _faultsBefore = faults.Count;
     }
 
     public FaultList Faults { get; }
@@ -114,7 +118,7 @@ internal sealed class RecipeDraft
     {
         if (substance is not null && WaterName.Is(substance))
         {
-            AddWaterByMass(taken, purity, id);
+            AddWaterAsSubstance(taken, purity, id);
             return;
         }
 
@@ -128,7 +132,7 @@ internal sealed class RecipeDraft
     }
 
     // Water is taken by volume or mass, and has no purity.
-    private void AddWaterByMass(Measure? taken, Measure? purity, string? id)
+    private void AddWaterAsSubstance(Measure? taken, Measure? purity, string? id)
     {
         if (purity is not null)
         {
@@ -160,6 +164,16 @@ internal sealed class RecipeDraft
     /// <summary>Adds a recipe, or a volume or mass of it.</summary>
     public void AddRecipe(Recipe? recipe, Measure? taken, string? id)
     {
+        if (recipe?.Nesting >= Recipe.MostNesting)
+        {
+            Faults.Add(
+                FaultKinds.NestedTooDeep,
+                NextPath + ".recipe",
+                (recipe.Nesting + 1).ToString(CultureInfo.InvariantCulture),
+                ("limit", Recipe.MostNesting.ToString(CultureInfo.InvariantCulture)));
+            recipe = null;
+        }
+
         if (recipe is not null && Checked(taken) is { } sound)
         {
             AddPart(new RecipePart(recipe, sound, id));
@@ -191,7 +205,7 @@ internal sealed class RecipeDraft
         var resolver = new SubstanceResolver(table, Faults);
         var stocks = _stocks.Select(stock => resolver.Resolve(stock, _root + ".stocks" + PathStep.Of(stock.Name!))).ToArray();
         var parts = _parts.Select((part, index) => resolver.Resolve(part, PathOf(_root, _positionOf[index]))).ToArray();
-        if (Faults.Any)
+        if (HasFaults)
         {
             // The parts that stand tell their own faults too, so that all are told at once.
             var sound = Enumerable.Range(0, parts.Length).Where(index => IsResolved(parts[index], table)).ToArray();
@@ -202,8 +216,10 @@ internal sealed class RecipeDraft
 
         var recipe = Product(stocks, Array.AsReadOnly(parts));
         Faults.AddRange(Mixture.TryPrepare(recipe, table, _root).Faults);
-        return Faults.Attempt(recipe);
+        return HasFaults ? Faults.Attempt<Recipe>(null) : new Attempt<Recipe>(recipe);
     }
+
+    private bool HasFaults => Faults.Count > _faultsBefore;
 
     private static bool IsResolved(Part part, SubstanceTable table) => part switch
     {

@@ -1,10 +1,12 @@
 using System;
 using System.Collections.Generic;
+using System.IO;
 using System.Linq;
+using System.Text;
 using Lyonium.Equilibria;
 using Lyonium.Faults;
 using Lyonium.Predictions;
-using Lyonium.Quantities;
+using Lyonium.Recipes;
 using Lyonium.Records;
 using Lyonium.Substances;
 using Lyonium.Tests.Records;
@@ -67,8 +69,8 @@ public sealed class EveryKindTests
                 "{ \"substance\": \"unobtainium\", \"mass\": \"1 g\" }",
                 "{ \"substance\": \"C4H4O4\", \"mass\": \"1 g\" }",
                 "{ \"stock\": \"none\", \"volume\": \"1 L\" }",
-                "{ \"recipe\": { } }")),
-            RecipeText.With("{ \"recipe\": " + RecipeText.With(Kilogram) + ", \"mass\": \"2 kg\" }"),
+                "{ \"recipe\": { \"format\": \"lyonium-recipe/1\", \"parts\": [ " + Kilogram + " ] }, \"mass\": \"2 kg\" }")),
+            RecipeNestingTests.Nested(Recipe.MostNesting + 1),
         ];
         foreach (var fault in documents.SelectMany(one => RecipeText.Try(one).Faults))
         {
@@ -81,8 +83,11 @@ public sealed class EveryKindTests
             yield return fault;
         }
 
-        var thrown = Assert.Throws<LyoniumException>(() => Measure.Parse("0 %", Dimension.Volume));
-        yield return thrown.Faults[0];
+        var record = RecordJson.Write(new Predictor().Predict(RecipeJson.Read(RecipeText.With(Kilogram))));
+        foreach (var fault in new RecordReplay(SubstanceTable.Default).TryReplay(record.Replace("\"exact\"", "\"guess\"", StringComparison.Ordinal)).Faults)
+        {
+            yield return fault;
+        }
     }
 
     private static IEnumerable<Fault> OfTables() =>
@@ -96,7 +101,10 @@ public sealed class EveryKindTests
             ("\"protons\": -1", "\"protons\": 1"),
             ("{ \"sodium\": 1 }", "{ \"sodum\": 1 }"),
             ("\"known\": \"read\"", "\"known\": \"heard\""),
-        }.SelectMany(change => UserTable.Read(UserTable.Text.Replace(change.From, change.To, StringComparison.Ordinal)).Faults);
+        }.SelectMany(change => UserTable.Read(UserTable.Text.Replace(change.From, change.To, StringComparison.Ordinal)).Faults)
+        .Concat(UserTable.Sound().TryLayer("other base form", new MemoryStream(Encoding.UTF8.GetBytes("""
+            { "format": "lyonium-table/1", "edition": "2026.12", "families": [ { "id": "sodium", "name": "sodium", "forms": [ { "formula": "H^+" } ], "steps": [] } ] }
+            """))).Faults);
 
     private static IEnumerable<Fault> OfMethods()
     {

@@ -144,6 +144,31 @@ public sealed class FuzzTests
     }
 
     [Fact]
+    public void MutatedRecords_areReplayedOrGiveFaultsAndNothingElse()
+    {
+        var random = new Random(Seed + 4);
+        var replay = new RecordReplay(SubstanceTable.Default);
+        var record = RecordJson.Write(new Predictor().Predict(RecipeJson.Read(RecipeText.OfTheContract)));
+        for (var i = 0; i < Mutations / 20; i++)
+        {
+            var json = Mutate(record, random);
+            try
+            {
+                var report = replay.TryReplay(json);
+                Assert.True(report.Success || report.Faults.Count > 0);
+                if (!report.Success)
+                {
+                    FaultText.Check(report.Faults);
+                }
+            }
+            catch (Exception e) when (e is not Xunit.Sdk.XunitException)
+            {
+                Assert.Fail($"Mutation {i}: {e.GetType().Name}: {e.Message}{Environment.NewLine}{json}{Environment.NewLine}{e.StackTrace}");
+            }
+        }
+    }
+
+    [Fact]
     public void Read_ofAMutation_throwsOnlyLyoniumException()
     {
         var random = new Random(Seed + 3);
@@ -170,6 +195,7 @@ public sealed class FuzzTests
             RecipeText.With("{ \"substance\": \"KCN\", \"mass\": \"1 g\" }, { \"substance\": \"HCl\", \"massFraction\": \"37 %\", \"volume\": \"1 mL\" }, { \"substance\": \"water\", \"mass\": \"1 kg\" }"),
             RecipeText.With("{ \"substance\": \"EDTA\", \"amount\": \"0.05 mol\" }, { \"substance\": \"NaOH\", \"molality\": \"2 mol/kg\", \"mass\": \"90 g\" }, { \"substance\": \"water\", \"volume\": \"1 L\" }"),
         };
+        sources.Add(RecipeText.With("{ \"recipe\": " + RecipeText.With("{ \"substance\": \"NaCl\", \"mass\": \"5 g\" }, { \"substance\": \"water\", \"mass\": \"1 kg\" }") + ", \"volume\": \"10 mL\" }, { \"substance\": \"water\", \"volume\": \"1 L\" }"));
         sources.AddRange(Repository.Examples().Select(File.ReadAllText));
         return [.. sources];
     }

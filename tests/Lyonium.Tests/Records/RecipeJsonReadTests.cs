@@ -191,6 +191,13 @@ public sealed class RecipeJsonReadTests
     [InlineData("{ \"stock\": \"acid\", \"concentration\": \"1 mol/L\", \"volume\": \"1 L\" }", "LYO0402 $.parts[0]")]
     [InlineData("{ \"stock\": \"acid\", \"amount\": \"1 mol\" }", "LYO0402 $.parts[0]")]
     [InlineData("{ \"recipe\": { } }", "LYO0207 $.parts[0].recipe")]
+    [InlineData("{ \"recipe\": 5 }", "LYO0208 $.parts[0].recipe")]
+    [InlineData("{ \"recipe\": { \"format\": \"lyonium-recipe/1\", \"parts\": [ ] } }", "LYO0401 $.parts[0].recipe.parts")]
+    [InlineData("{ \"recipe\": { \"format\": \"lyonium-recipe/1.1\" } }", "LYO0204 $.parts[0].recipe.format")]
+    [InlineData("{ \"recipe\": { \"format\": \"lyonium-recipe/1\", \"id\": \"\", \"parts\": [ { \"substance\": \"water\", \"mass\": \"-1 g\" } ] } }", "LYO0105 $.parts[0].recipe.parts[0].mass")]
+    [InlineData("{ \"recipe\": { \"format\": \"lyonium-recipe/1\", \"id\": \"\", \"parts\": [ { \"substance\": \"water\", \"mass\": \"1 g\" } ] } }", "LYO0403 $.parts[0].recipe.id")]
+    [InlineData("{ \"recipe\": { \"format\": \"lyonium-recipe/1\", \"parts\": [ { \"substance\": \"water\", \"mass\": \"1 g\" } ] }, \"mass\": \"2 g\" }", "LYO0411 $.parts[0]")]
+    [InlineData("{ \"recipe\": { \"format\": \"lyonium-recipe/1\", \"parts\": [ { \"substance\": \"water\", \"mass\": \"1 g\" } ] }, \"mass\": \"1 g\", \"volume\": \"1 mL\" }", "LYO0402 $.parts[0]")]
     public void TryRead_badPart_isRefusedAtItsPlace(string part, string expected) =>
         Assert.Contains(expected, RecipeText.CodesAndPathsOf(RecipeText.With(part + ", " + Water)));
 
