@@ -8,7 +8,10 @@ internal static class Repository
 {
     public static string Root { get; } = FindRoot();
 
-    public static string Schema(string name) => Path.Combine(Root, "docs", "schemas", name + ".schema.json");
+    /// <summary>A file by its place in the repository, with forward slashes.</summary>
+    public static string File(string relative) => Path.Combine(Root, relative.Replace('/', Path.DirectorySeparatorChar));
+
+    public static string Schema(string name) => File("docs/schemas/" + name + ".schema.json");
 
     /// <summary>The example recipes; empty where there are none yet.</summary>
     public static string[] Examples()
@@ -20,7 +23,7 @@ internal static class Repository
     private static string FindRoot()
     {
         var folder = new DirectoryInfo(AppContext.BaseDirectory);
-        while (folder is not null && !File.Exists(Path.Combine(folder.FullName, "Library.sln")))
+        while (folder is not null && !System.IO.File.Exists(Path.Combine(folder.FullName, "Library.sln")))
         {
             folder = folder.Parent;
         }

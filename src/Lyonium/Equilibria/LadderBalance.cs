@@ -30,6 +30,7 @@ internal ref struct LadderBalance
     private double _inverseGammaH;
     private double _inverseGammaOH;
     private double _gammasAt;
+    private double _largestLog10Gamma;
     private double _gammaNoise;
 
     /// <summary>Starts from activity coefficients of one.</summary>
@@ -111,11 +112,10 @@ internal ref struct LadderBalance
             if (round > 0 && Math.Abs(miss) <= 1e-9 * IonicStrength)
             {
                 // What the last two rounds say that the coefficients are still off by.
-                var left = miss == 0 ? 0 : change * Math.Abs(miss / (miss - lastMiss));
+                var left = miss == 0 ? 0 : Math.Min(change, change * Math.Abs(miss / (miss - lastMiss)));
                 if (left <= 1e-16 || Math.Abs(miss) <= 1e-15 * IonicStrength)
                 {
-                    _gammaNoise += left;
-                    return true;
+                    return Settled(left);
                 }
             }
 
@@ -134,7 +134,7 @@ internal ref struct LadderBalance
             change = UseGammasAt(next);
             if (change == 0 && next == IonicStrength)
             {
-                return true;
+                return Settled(0);
             }
 
             if (double.IsNaN(change) || double.IsInfinity(change))
@@ -145,12 +145,17 @@ internal ref struct LadderBalance
             if (!double.IsInfinity(high) && high - low <= 4e-16 * high)
             {
                 Speciate(activity);
-                _gammaNoise += change;
-                return Math.Abs(IonicStrength - _gammasAt) <= 1e-13 * IonicStrength;
+                return Math.Abs(IonicStrength - _gammasAt) <= 1e-13 * IonicStrength && Settled(change);
             }
         }
 
         return false;
+    }
+
+    private bool Settled(double left)
+    {
+        _gammaNoise = (8 * HalfLastDigit * _largestLog10Gamma) + left;
+        return true;
     }
 
     // A secant on (ionic strength out) − (ionic strength in), kept inside the bracket that the misses give.
@@ -185,14 +190,14 @@ internal ref struct LadderBalance
             return 0;
         }
 
-        double change = 0, largest = 0;
+        double change = 0;
+        _largestLog10Gamma = 0;
         for (var i = 0; i < _log10Gammas.Length; i++)
         {
             change = Math.Max(change, Math.Abs(_nextLog10Gammas[i] - _log10Gammas[i]));
-            largest = Math.Max(largest, Math.Abs(_nextLog10Gammas[i]));
+            _largestLog10Gamma = Math.Max(_largestLog10Gamma, Math.Abs(_nextLog10Gammas[i]));
         }
 
-        _gammaNoise = 8 * HalfLastDigit * largest;
         GammasMove = true;
         _nextLog10Gammas.CopyTo(_log10Gammas);
         _inverseGammaH = Math.Pow(10, -_log10Gammas[Equilibrium.HydrogenIon]);

@@ -10,7 +10,7 @@ using Xunit;
 
 namespace Lyonium.Tests.Architecture;
 
-/// <summary>A room uses only the rooms that it stands on, and what those stand on (design.md, decisions/0001).</summary>
+/// <summary>A room uses only the rooms that it stands on, and what those stand on (DEVELOPERS.md, decisions/0001).</summary>
 public sealed class RoomsTests
 {
     private const string Root = "Lyonium.";
@@ -27,12 +27,12 @@ public sealed class RoomsTests
         ["Equilibria"] = [],
         ["Activity"] = ["Equilibria", "Water"],
         ["Solvers"] = ["Equilibria"],
-        ["Conformance"] = ["Activity", "Equilibria", "Solvers"],
         ["Substances"] = ["Quantities", "Provenance", "Documents"],
         ["Recipes"] = ["Quantities", "Substances", "Water"],
         ["Modelling"] = ["Recipes", "Substances", "Provenance", "Water", "Equilibria", "Activity"],
         ["Predictions"] = ["Modelling", "Solvers", "Documents"],
         ["Records"] = ["Predictions", "Documents"],
+        ["Conformance"] = ["Activity", "Solvers"],
     };
 
     [Fact]

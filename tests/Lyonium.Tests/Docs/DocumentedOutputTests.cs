@@ -23,12 +23,18 @@ public sealed partial class DocumentedOutputTests
     [MemberData(nameof(Pages))]
     public void Page_shows_what_the_tool_prints(string page)
     {
-        var text = File.ReadAllText(Repository.Path(page)).Replace("\r\n", "\n", StringComparison.Ordinal);
-        var current = Block().Replace(text, block => block.Groups["before"].Value + Print(block) + block.Groups["after"].Value);
-        Assert.Equal(Block().Count(text), Regex.Count(text, "<!-- lyonium "));
+        var text = File.ReadAllText(Repository.File(page)).Replace("\r\n", "\n", StringComparison.Ordinal);
+        var blocks = Block().Matches(text).ToArray();
+        Assert.Equal(Regex.Count(text, "<!-- lyonium "), blocks.Length);
+        var current = text;
+        foreach (var shown in blocks.Reverse().Select(block => (Place: block.Groups["shown"], Output: Print(block))))
+        {
+            current = current.Remove(shown.Place.Index, shown.Place.Length).Insert(shown.Place.Index, shown.Output);
+        }
+
         if (Update)
         {
-            File.WriteAllText(Repository.Path(page), current);
+            File.WriteAllText(Repository.File(page), current);
             return;
         }
 
@@ -38,22 +44,22 @@ public sealed partial class DocumentedOutputTests
     [Fact]
     public void Every_example_is_predicted_and_shown_on_a_page()
     {
-        var shown = string.Concat(PageNames().Select(page => File.ReadAllText(Repository.Path(page))));
-        var examples = Directory.EnumerateFiles(Repository.Path("docs/examples"), "*.json").Select(file => Path.GetFileName(file)).ToArray();
+        var shown = string.Concat(PageNames().Select(page => File.ReadAllText(Repository.File(page))));
+        var examples = Directory.EnumerateFiles(Repository.File("docs/examples"), "*.json").Select(file => Path.GetFileName(file)).ToArray();
         Assert.True(examples.Length >= 6);
         Assert.All(examples, example => Assert.Contains($"<!-- lyonium predict docs/examples/{example} -->", shown, StringComparison.Ordinal));
     }
 
     private static IEnumerable<string> PageNames() =>
         Directory.EnumerateFiles(Repository.Root, "*.md")
-            .Concat(Directory.EnumerateFiles(Repository.Path("docs"), "*.md", SearchOption.AllDirectories))
+            .Concat(Directory.EnumerateFiles(Repository.File("docs"), "*.md", SearchOption.AllDirectories))
             .Where(file => File.ReadAllText(file).Contains("<!-- lyonium ", StringComparison.Ordinal))
             .Select(file => Path.GetRelativePath(Repository.Root, file).Replace('\\', '/'))
             .Order(StringComparer.Ordinal);
 
     private static string Print(Match block)
     {
-        var (exitStatus, output, errors) = Repository.RunTool(block.Groups["arguments"].Value.Trim());
+        var (exitStatus, output, errors) = BuiltTool.Run(block.Groups["arguments"].Value.Trim());
         Assert.Equal(("", 0), (errors, exitStatus));
         IEnumerable<string> lines = output.TrimEnd('\n').Split('\n');
         if (block.Groups["first"].Success)

@@ -17,11 +17,11 @@ public sealed class FaultsPageTests
         var current = Write();
         if (Environment.GetEnvironmentVariable("LYONIUM_UPDATE_DOCS") == "1")
         {
-            File.WriteAllText(Repository.Path(Page), current);
+            File.WriteAllText(Repository.File(Page), current);
             return;
         }
 
-        Assert.Equal(current, File.ReadAllText(Repository.Path(Page)).Replace("\r\n", "\n", StringComparison.Ordinal));
+        Assert.Equal(current, File.ReadAllText(Repository.File(Page)).Replace("\r\n", "\n", StringComparison.Ordinal));
     }
 
     private static string Write()

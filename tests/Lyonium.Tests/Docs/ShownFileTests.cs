@@ -15,7 +15,7 @@ public sealed partial class ShownFileTests
     [Fact]
     public void Guides_show_files_as_they_are()
     {
-        var pages = Directory.EnumerateFiles(Repository.Path("docs/guides"), "*.md").Order(StringComparer.Ordinal).ToArray();
+        var pages = Directory.EnumerateFiles(Repository.File("docs/guides"), "*.md").Order(StringComparer.Ordinal).ToArray();
         var shown = 0;
         foreach (var page in pages)
         {
@@ -23,7 +23,7 @@ public sealed partial class ShownFileTests
             var current = Block().Replace(text, block =>
             {
                 shown++;
-                var file = File.ReadAllText(Repository.Path(block.Groups["path"].Value)).Replace("\r\n", "\n", StringComparison.Ordinal);
+                var file = File.ReadAllText(Repository.File(block.Groups["path"].Value)).Replace("\r\n", "\n", StringComparison.Ordinal);
                 return block.Groups["before"].Value + file + block.Groups["after"].Value;
             });
             if (Environment.GetEnvironmentVariable("LYONIUM_UPDATE_DOCS") == "1")

@@ -107,4 +107,16 @@ public sealed class ExactSolverExtremesTests
 
         Assert.Equal(7.25, Solving.Exact.Solve(equilibrium, Solving.Ideal).PH, 1e-5);
     }
+
+    // An ampholyte alone: at its zero the ionic strength is at its lowest, and two rounds of it can be equal to the last digit.
+    [Theory]
+    [InlineData(0.17151657836338047, -1.9484952092170715, 6.5107086300849915, 7.454704105854034)]
+    [InlineData(2.437573250231716, 1.7703326344490051, 8.243542075157166, 8.827558875083923)]
+    public void Solve_Davies_ampholyte_alone_at_the_lowest_ionic_strength(double total, params double[] pKa)
+    {
+        // The outer two steps mirror each other, so the activity coefficients of the ampholyte's neighbours cancel.
+        var outcome = Solving.Solved(MixtureInput.Of(new LadderInput(total, 2, pKa)), Solving.Davies);
+
+        Assert.Equal((pKa[1] + pKa[2]) / 2, outcome.PH, 1e-4);
+    }
 }
