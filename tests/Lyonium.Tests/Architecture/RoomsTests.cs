@@ -27,7 +27,6 @@ public sealed class RoomsTests
         ["Equilibria"] = [],
         ["Activity"] = ["Equilibria", "Water"],
         ["Solvers"] = ["Equilibria"],
-        ["Conformance"] = ["Activity", "Equilibria", "Solvers"],
         ["Substances"] = ["Quantities", "Provenance", "Documents"],
         ["Recipes"] = ["Quantities", "Substances", "Water"],
         ["Modelling"] = ["Recipes", "Substances", "Provenance", "Water", "Equilibria", "Activity"],
