@@ -109,14 +109,9 @@ internal ref struct LadderBalance
         {
             Speciate(activity);
             var miss = IonicStrength - _gammasAt;
-            if (round > 0 && Math.Abs(miss) <= 1e-9 * IonicStrength)
+            if (change <= 1e-15 * (1 + _largestLog10Gamma) && Math.Abs(miss) <= 1e-13 * IonicStrength)
             {
-                // What the last two rounds say that the coefficients are still off by.
-                var left = miss == 0 ? 0 : Math.Min(change, change * Math.Abs(miss / (miss - lastMiss)));
-                if (left <= 1e-16 || Math.Abs(miss) <= 1e-15 * IonicStrength)
-                {
-                    return Settled(left);
-                }
+                return Settled(change);
             }
 
             if (miss > 0)
@@ -152,9 +147,10 @@ internal ref struct LadderBalance
         return false;
     }
 
-    private bool Settled(double left)
+    // What the last round changed is a fair bound on what further rounds would.
+    private bool Settled(double change)
     {
-        _gammaNoise = (8 * HalfLastDigit * _largestLog10Gamma) + left;
+        _gammaNoise = (8 * HalfLastDigit * _largestLog10Gamma) + change;
         return true;
     }
 
@@ -168,7 +164,7 @@ internal ref struct LadderBalance
             next = secant > 0.1 * next && secant < 10 * next ? secant : next;
         }
 
-        if (round < 20 && next > low && next < high)
+        if (round < 20 && next >= low && next <= high)
         {
             return next;
         }

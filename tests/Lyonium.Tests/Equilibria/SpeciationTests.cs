@@ -97,6 +97,27 @@ public sealed class SpeciationTests
         }
     }
 
+    // A model may look at every molality. One ladder loses the charge that the other gains, so the ionic strength hardly moves while the
+    // coefficients do.
+    [Theory]
+    [InlineData(0.4)]
+    [InlineData(-0.4)]
+    [InlineData(0.8)]
+    [InlineData(-0.8)]
+    public void At_model_of_single_molalities_coefficients_agree_with_the_molalities(double perMolPerKg)
+    {
+        var equilibrium = MixtureInput.Of(
+            new LadderInput(0.5, 0, 7), new LadderInput(0.5, 1, 7), new LadderInput(0.3, 1), new LadderInput(0.3, -1)).ToEquilibrium();
+        var model = new MolalityModel(perMolPerKg);
+
+        var speciation = Speciation.At(equilibrium, model, 7.3);
+
+        var again = new double[equilibrium.SpeciesCount];
+        model.Log10Gammas(equilibrium, speciation.IonicStrengthMolPerKg, speciation.MolalitiesMolPerKg.ToArray(), again);
+        Assert.All(again.Zip(speciation.Log10Gammas), pair => Assert.Equal(pair.First, pair.Second, 1e-14));
+        Assert.True(Math.Abs(again[Equilibrium.WaterIons]) > 0.01, "The model must matter for the test to mean anything.");
+    }
+
     [Fact]
     public void At_charge_falls_with_pH()
     {
@@ -133,4 +154,21 @@ public sealed class SpeciationTests
 
     private static void AssertWithin(Rational difference, Rational size, double relative, string what) =>
         Assert.True((difference.Abs() - (Rational.Exactly(relative) * size)).Sign <= 0, what);
+
+    private sealed class MolalityModel(double perMolPerKg) : IActivityModel
+    {
+        public string Name => "of single molalities";
+
+        public double HighestIonicStrengthMolPerKg => 1;
+
+        public string Source => "a test";
+
+        public void Log10Gammas(Equilibrium equilibrium, double ionicStrengthMolPerKg, ReadOnlySpan<double> molalities, Span<double> log10Gammas)
+        {
+            for (var i = 0; i < log10Gammas.Length; i++)
+            {
+                log10Gammas[i] = perMolPerKg * molalities[(i + 1) % molalities.Length];
+            }
+        }
+    }
 }
