@@ -11,6 +11,7 @@ internal sealed class ApproximationRounds
     private readonly List<Protolyte> _protolytes = [];
     private readonly Protolyte? _pair;
     private double _h = double.NaN;
+    private bool _isExhausted;
 
     public ApproximationRounds(ProtonLevels levels)
     {
@@ -40,14 +41,23 @@ internal sealed class ApproximationRounds
     /// </summary>
     public double Change { get; private set; } = double.PositiveInfinity;
 
-    /// <summary>The next estimate of the hydrogen-ion molality; not above zero where more would dissociate than there is.</summary>
+    /// <summary>
+    /// The next estimate of the hydrogen-ion molality; NaN or not above zero where more would dissociate at the last one than there is.
+    /// </summary>
     public double Next()
     {
-        _h = double.IsNaN(_h) ? First() : Corrected();
-        var (given, taken) = (_protolytes.ConvertAll(one => one.Given), _protolytes.ConvertAll(one => one.Taken));
-        if (_h > 0 && _protolytes.Exists(one => !one.Correct(_h)))
+        if (_isExhausted)
         {
             return double.NaN;
+        }
+
+        _h = double.IsNaN(_h) ? First() : Corrected();
+        var (given, taken) = (_protolytes.ConvertAll(one => one.Given), _protolytes.ConvertAll(one => one.Taken));
+        _isExhausted = _h > 0 && _protolytes.Exists(one => !one.Correct(_h));
+        if (_isExhausted)
+        {
+            Change = double.PositiveInfinity;
+            return _h;
         }
 
         var moved = _protolytes.Select((one, i) => Math.Abs(one.Given - given[i]) + Math.Abs(one.Taken - taken[i])).Sum();

@@ -17,9 +17,9 @@ namespace Lyonium.Solvers;
 /// </para>
 /// <para>
 /// Range of use: from the neglect start a weak acid needs c &gt; K; strongly dissociated steps do not settle, and the outcome says so with
-/// the iterates. A settled answer fulfils the whole charge balance to the stated figures; the error that is left is bounded from the
-/// ratio of the last corrections, so that a slow case does not stop early. Activity coefficients are taken at the ionic strength of the
-/// answer. Stateless and thread-safe.
+/// the iterates. A settled answer fulfils the whole charge balance to the stated figures; the error that is left is estimated from the
+/// ratio of the last corrections and from the amounts that still moved, so that a slow case does not stop early. Activity coefficients
+/// are taken at the ionic strength of the answer. Stateless and thread-safe.
 /// </para>
 /// </remarks>
 public sealed class SuccessiveApproximationSolver : ISolver
@@ -70,10 +70,11 @@ public sealed class SuccessiveApproximationSolver : ISolver
             var correction = iterates.Count == 0 ? double.NaN : Math.Log(h / last);
             iterates.Add(new Iterate(-Math.Log10(h) - log10GammaH, iterates.Count == 0 ? 0 : -correction / Math.Log(10)));
             var rate = Math.Abs(correction / lastCorrection);
-            var left = rate < 1 ? Math.Abs(correction) * Math.Max(rate / (1 - rate), 0.01) : double.PositiveInfinity;
-            if ((correction == 0 || (Math.Abs(correction) <= tolerance && left <= tolerance)) && rounds.Change <= tolerance)
+            // Large and small corrections can take turns, so a small one alone says little; the amounts behind it must stand still as well.
+            var left = Math.Max(Left(correction, rate), rounds.Change);
+            if (Math.Abs(correction) <= tolerance && left <= tolerance)
             {
-                return Settled(iterates, correction == 0 ? 0 : left, tolerance);
+                return Settled(iterates, left, tolerance);
             }
 
             last = h;
@@ -81,6 +82,17 @@ public sealed class SuccessiveApproximationSolver : ISolver
         }
 
         return NotSettled(iterates, "the answer still changes after " + MostRounds.ToString(CultureInfo.InvariantCulture) + " rounds");
+    }
+
+    // What is left of corrections that keep shrinking at the rate of the last one.
+    private static double Left(double correction, double rate)
+    {
+        if (correction == 0)
+        {
+            return 0;
+        }
+
+        return rate < 1 ? Math.Abs(correction) * Math.Max(rate / (1 - rate), 0.01) : double.PositiveInfinity;
     }
 
     private static SolverOutcome Settled(List<Iterate> iterates, double left, double tolerance)
@@ -93,7 +105,12 @@ public sealed class SuccessiveApproximationSolver : ISolver
             Assumptions =
             [
                 new SolverAssumption(
-                    "figures-kept", -1, left * toPH, tolerance * toPH, Held: true, "error left in pH, from the ratio of the last corrections"),
+                    "figures-kept",
+                    -1,
+                    left * toPH,
+                    tolerance * toPH,
+                    Held: true,
+                    "estimate of the error left in pH, from the ratio of the last corrections and the amounts that still moved"),
             ],
         };
     }

@@ -21,6 +21,8 @@ internal static class Schemas
 
     public static JsonSchema Table { get; } = Load("lyonium-table-1");
 
+    public static JsonSchema Comparison { get; } = Load("lyonium-comparison-1");
+
     public static JsonSchema Cautions { get; } = Load("lyonium-cautions-1");
 
     /// <summary>What the schema has against a document; empty where it holds.</summary>

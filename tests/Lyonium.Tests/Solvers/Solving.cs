@@ -7,10 +7,12 @@ using Xunit;
 
 namespace Lyonium.Tests.Solvers;
 
-/// <summary>The exact method on a mixture, with the mixture in the message of a failure.</summary>
+/// <summary>The methods on a mixture, with the mixture in the message of a failure.</summary>
 internal static class Solving
 {
     public static readonly ExactSolver Exact = new();
+    public static readonly SuccessiveApproximationSolver Successive = new();
+    public static readonly DominantAcidSolver Dominant = new();
     public static readonly IdealModel Ideal = new();
     public static readonly DaviesModel Davies = new();
 
