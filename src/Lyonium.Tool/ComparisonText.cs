@@ -13,6 +13,11 @@ internal sealed class ComparisonText(Comparison comparison)
         console.MarkupLineInterpolated($"[bold]{PlainText.Of(comparison.Recipe.Name ?? "Recipe")}[/]{(comparison.Recipe.Id is null ? "" : "  " + PlainText.Of(comparison.Recipe.Id))}");
         console.MarkupLineInterpolated(
             CultureInfo.InvariantCulture, $"every method against the exact one, tolerance {comparison.Tolerance}, activity coefficients {comparison.ActivityModel}");
+        if (comparison.OutsideTheModel.Count > 0)
+        {
+            console.MarkupLineInterpolated($"of the homogeneous model only: {string.Join(", ", comparison.OutsideTheModel)}");
+        }
+
         console.WriteLine();
         var grid = new Grid();
         for (var i = 0; i < 5; i++)

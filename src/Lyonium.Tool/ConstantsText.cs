@@ -41,6 +41,7 @@ internal sealed class ConstantsText(SubstanceTable table, IAnsiConsole console)
         Row(grid, "brings", Brings(substance));
         AddValue(grid, "density", substance.DensityKgPerL, "g/mL");
         AddValue(grid, "molar volume in solution", substance.MolarVolumeMLPerMol, "mL/mol");
+        AddValue(grid, "solubility", substance.SolubilityMolPerKg, "mol/kg");
         if (substance.SolutionDensities is { Points: var points })
         {
             var (first, last) = (points[0], points[^1]);
@@ -78,6 +79,11 @@ internal sealed class ConstantsText(SubstanceTable table, IAnsiConsole console)
             {
                 Row(grid, "  chosen because", step.Reason);
             }
+        }
+
+        for (var form = 0; form < family.SolubilitiesMolPerKg.Count; form++)
+        {
+            AddValue(grid, "solubility of " + family.Forms[form].Display, family.SolubilitiesMolPerKg[form], "mol/kg");
         }
 
         if (family.IsSpectator)

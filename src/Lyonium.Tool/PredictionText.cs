@@ -47,7 +47,7 @@ internal sealed class PredictionText(Prediction prediction)
         var recipe = prediction.Recipe;
         var celsius = NumberFormat.Short(recipe.TemperatureK - 273.15);
         console.MarkupLineInterpolated($"[bold]{PlainText.Of(recipe.Name ?? "Recipe")}[/]{(recipe.Id is null ? "" : "  " + PlainText.Of(recipe.Id))}");
-        console.MarkupLineInterpolated($"[bold green]pH {prediction.Reported}[/] at {celsius} °C");
+        console.MarkupLineInterpolated($"[bold green]pH {prediction.Reported}[/] at {celsius} °C{Scope()}");
         var brief = new Grid().AddColumn(new GridColumn { Padding = new Padding(2, 0, 2, 0) }).AddColumn();
         Row(brief, "pH", prediction.PH.ToString("F4", CultureInfo.InvariantCulture) + "  (activity, molality scale)");
         Row(brief, "p[H]", prediction.PHydrogenConcentration.ToString("F4", CultureInfo.InvariantCulture) + "  (concentration, mol/L)");
@@ -56,6 +56,9 @@ internal sealed class PredictionText(Prediction prediction)
         Row(brief, "method", prediction.Method + ", activity coefficients " + prediction.ActivityModel);
         console.Write(brief);
     }
+
+    private string Scope() =>
+        prediction.OutsideTheModel.Count == 0 ? "" : ", of the homogeneous model only: " + string.Join(", ", prediction.OutsideTheModel);
 
     private static void Row(Grid grid, params string[] cells) => grid.AddRow([.. cells.Select(cell => new Text(cell))]);
 

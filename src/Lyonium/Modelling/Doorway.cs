@@ -42,7 +42,7 @@ internal sealed class Doorway(Mixture mixture, IActivityModel model)
     }
 
     /// <summary>The id of the species of a family that holds so many protons more than the base form.</summary>
-    private static string SpeciesId(Family family, int protons) => family.Id + ":" + protons.ToString(CultureInfo.InvariantCulture);
+    internal static string SpeciesId(Family family, int protons) => family.Id + ":" + protons.ToString(CultureInfo.InvariantCulture);
 
     private static Solvent SolventAt(double temperatureK)
     {

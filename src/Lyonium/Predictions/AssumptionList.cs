@@ -16,6 +16,7 @@ internal sealed class AssumptionList(SolvedMixture answer, Predictor predictor, 
             .Concat(OfTheModel())
             .Concat(OfTheConstants())
             .Concat(OfTheWater())
+            .Concat(OfTheScope())
             .Concat(OfTheRecipe())
             .ToArray();
 
@@ -109,6 +110,10 @@ internal sealed class AssumptionList(SolvedMixture answer, Predictor predictor, 
         }
     }
 
+    // What the model leaves out is listed only where it shows.
+    private IEnumerable<Assumption> OfTheScope() =>
+        new SolubilityCheck(answer, predictor.ActivityModel).Exceeded().Concat(CautionTable.Default.ReactionsIn(Mixture));
+
     private IEnumerable<Assumption> OfTheRecipe()
     {
         if (Mixture.Recipe.Temperature is null)
@@ -124,6 +129,6 @@ internal sealed class AssumptionList(SolvedMixture answer, Predictor predictor, 
         yield return new Assumption(
             "closed-to-air", WholeMixture, null, null, Held: true, "taken for granted: no gas is taken up or given off");
         yield return new Assumption(
-            "all-dissolved", WholeMixture, null, null, Held: true, "taken for granted: solubility is not checked");
+            "all-dissolved", WholeMixture, null, null, Held: true, "taken for granted: only listed solubilities are checked");
     }
 }

@@ -14,6 +14,9 @@ namespace Lyonium.Predictions;
 /// <param name="Hazards">GHS hazard statement codes.</param>
 /// <param name="HazardsEu">Codes that only the European Union has.</param>
 /// <param name="Text">What to do.</param>
+/// <param name="Reaction">
+/// How the substances consume each other otherwise than by proton exchange, in words; <see langword="null"/> where they do not.
+/// </param>
 internal sealed record CautionRule(
     string Code,
     IReadOnlyList<string> Groups,
@@ -21,15 +24,32 @@ internal sealed record CautionRule(
     double? BelowMolPerL,
     IReadOnlyList<string> Hazards,
     IReadOnlyList<string> HazardsEu,
-    string Text)
+    string Text,
+    string? Reaction)
 {
     public Caution? Apply(Mixture mixture)
+    {
+        var because = Because(mixture);
+        return because.Length > 0 ? new Caution(Code, Hazards, HazardsEu, Text, because) : null;
+    }
+
+    /// <summary>The assumption that does not hold where substances consume each other.</summary>
+    public Assumption? ReactionIn(Mixture mixture)
+    {
+        var because = Reaction is null ? [] : Because(mixture);
+        return because.Length > 0
+            ? new Assumption(ModelScope.NoReactionButProtonExchange, string.Join(", ", because), null, null, Held: false, Reaction!)
+            : null;
+    }
+
+    /// <summary>The substances that call for it; empty where it does not apply.</summary>
+    private string[] Because(Mixture mixture)
     {
         var first = Members(mixture, Groups[0], part => IsStrongEnough(part) && !(Strength(part) >= BelowMolPerL));
         var second = Groups.Count == 1 ? first : Members(mixture, Groups[1], _ => true);
         var because = first.Concat(second).Distinct(StringComparer.Ordinal).ToArray();
-        var met = Groups.Count == 1 ? because.Length > 0 : first.Count > 0 && second.Count > 0 && because.Length > 1;
-        return met ? new Caution(Code, Hazards, HazardsEu, Text, because) : null;
+        var met = Groups.Count == 1 || (first.Count > 0 && second.Count > 0 && because.Length > 1);
+        return met ? because : [];
     }
 
     private static List<string> Members(Mixture mixture, string group, Func<PreparedPart, bool> isMember) =>

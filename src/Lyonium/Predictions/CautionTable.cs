@@ -35,6 +35,9 @@ internal sealed class CautionTable
         return cautions.ToArray();
     }
 
+    /// <summary>How the substances of a mixture consume each other otherwise than by proton exchange, as assumptions that do not hold.</summary>
+    public IEnumerable<Assumption> ReactionsIn(Mixture mixture) => _rules.Select(rule => rule.ReactionIn(mixture)).OfType<Assumption>();
+
     private static CautionTable ReadEmbedded()
     {
         using var stream = typeof(CautionTable).Assembly.GetManifestResourceStream(Resource)
@@ -51,7 +54,7 @@ internal sealed class CautionTable
 
     private static CautionRule ReadRule(JsonPlace place)
     {
-        var properties = place.Properties("code", "when", "hazard", "hazardEu", "text", "source", "known", "note");
+        var properties = place.Properties("code", "when", "hazard", "hazardEu", "text", "scope", "reaction", "source", "known", "note");
         var when = place.Need(properties, "when")!.Properties("concentrated", "together", "present", "fromMolPerL", "belowMolPerL");
         string[] groups = when.TryGetValue("together", out var pair)
             ? [.. pair.Items().Select(item => item.Text()!)]
@@ -63,7 +66,8 @@ internal sealed class CautionTable
             when.TryGetValue("belowMolPerL", out var below) ? below.Number() : null,
             Texts(properties, "hazard"),
             Texts(properties, "hazardEu"),
-            place.Need(properties, "text")!.Text()!);
+            place.Need(properties, "text")!.Text()!,
+            properties.ContainsKey("scope") ? place.Need(properties, "reaction")!.Text()! : null);
     }
 
     private static string[] Texts(IReadOnlyDictionary<string, JsonPlace> properties, string name) =>

@@ -13,4 +13,10 @@ public sealed record Comparison(Recipe Recipe, string ActivityModel, double Tole
 {
     /// <summary>The tolerance unless another is asked for: 0.02 in pH.</summary>
     public const double DefaultTolerance = 0.02;
+
+    /// <summary>
+    /// What the mixture does that the model leaves out, by the exact answer; empty where nothing of the kind is known. See
+    /// <see cref="Prediction.OutsideTheModel"/>.
+    /// </summary>
+    public IReadOnlyList<string> OutsideTheModel => ModelScope.Reasons(Rows[0].Assumptions);
 }

@@ -69,6 +69,16 @@ public sealed class Prediction
     /// <summary>What was taken for granted.</summary>
     public required IReadOnlyList<Assumption> Assumptions { get; init; }
 
+    /// <summary>
+    /// What the mixture does that the model leaves out, such as <c>may not dissolve</c> or <c>consumes itself</c>; empty where nothing of
+    /// the kind is known.
+    /// </summary>
+    /// <remarks>
+    /// The model knows one solution in which nothing but protons is exchanged. Where this is not empty, the number is the pH of that
+    /// solution, not of what stands in the beaker; the assumptions that do not hold tell of what and why.
+    /// </remarks>
+    public IReadOnlyList<string> OutsideTheModel => ModelScope.Reasons(Assumptions);
+
     /// <summary>The formula of a short-cut, in words and symbols; <see langword="null"/> where the whole balance was solved.</summary>
     public string? Formula => _answer.Outcome.Formula;
 
@@ -86,6 +96,7 @@ public sealed class Prediction
     public Working Work() => new WorkingBuilder(_answer).Build();
 
     /// <summary>The reported pH in words.</summary>
-    /// <returns>Such as <c>pH 2.35</c>.</returns>
-    public override string ToString() => "pH " + Reported;
+    /// <returns>Such as <c>pH 2.35</c>; or <c>pH 2.35, of the homogeneous model only: may not dissolve</c>.</returns>
+    public override string ToString() =>
+        "pH " + Reported + (OutsideTheModel.Count == 0 ? "" : ", of the homogeneous model only: " + string.Join(", ", OutsideTheModel));
 }

@@ -86,6 +86,21 @@ public sealed class Mixture
 
     /// <summary>The same mixture with another mass of water: what an error in the water does is found with it.</summary>
     internal Mixture WithWaterKg(double waterKg) => new(Recipe, Table, Parts, waterKg, VolumeL, MassKg, EstimatedWaterKg);
+
+    /// <summary>A substance alone in a kilogram of water, under the same conditions; its volume and mass are those of the water.</summary>
+    internal Mixture Alone(Substance substance, double amountMol)
+    {
+        var part = new PreparedPart
+        {
+            Part = Recipe.Parts[0],
+            Substance = substance,
+            AmountMol = amountMol,
+            WaterKg = 1,
+            VolumeL = 1,
+            MassKg = 1,
+        };
+        return new Mixture(Recipe, Table, [part], part.WaterKg, part.VolumeL, part.MassKg, estimatedWaterKg: 0);
+    }
 }
 
 /// <summary>How much of a substance is in a mixture.</summary>

@@ -27,7 +27,7 @@ public static class RecordJson
         prediction.Recipe,
         prediction.PH,
         prediction.PHydrogenConcentration,
-        new ReportedEntry(prediction.Reported, "two decimals"),
+        new ReportedEntry(prediction.Reported, RuleOf(prediction)),
         prediction.Method,
         prediction.ActivityModel,
         new NumberWithUnit(prediction.IonicStrengthMolPerKg, "mol/kg"),
@@ -40,6 +40,10 @@ public static class RecordJson
         prediction.Cautions.Select(Describe).ToArray(),
         Describe(prediction.Evidence),
         prediction.Recipe.Notes);
+
+    private static string RuleOf(Prediction prediction) =>
+        "two decimals"
+        + (prediction.OutsideTheModel.Count == 0 ? "" : "; homogeneous model only: " + string.Join(", ", prediction.OutsideTheModel));
 
     private static NumberWithUnit VolumeOf(Prediction prediction) =>
         prediction.Recipe.MakeUpTo is { Dimension: Dimension.Volume } mark

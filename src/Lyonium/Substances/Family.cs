@@ -1,4 +1,5 @@
 using System.Collections.Generic;
+using Lyonium.Provenance;
 
 namespace Lyonium.Substances;
 
@@ -14,6 +15,12 @@ public sealed record Family
 
     /// <summary>The forms, the most protonated first.</summary>
     public required IReadOnlyList<ChemicalFormula> Forms { get; init; }
+
+    /// <summary>
+    /// How much of each form as such dissolves, in mol per kg of water, in the order of <see cref="Forms"/>; <see langword="null"/> where
+    /// none is listed. Of an acid it leaves out what dissociates; of a gas it is that at 101.325 kPa.
+    /// </summary>
+    public IReadOnlyList<SourcedValue?> SolubilitiesMolPerKg { get; init; } = [];
 
     /// <summary>The steps between the forms, the most acidic first; one fewer than forms.</summary>
     public required IReadOnlyList<DissociationStep> Steps { get; init; }

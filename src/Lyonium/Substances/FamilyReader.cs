@@ -44,12 +44,12 @@ internal sealed class FamilyReader(SourcedValueReader values)
         var formPlaces = place.Need(properties, "forms")?.Items() ?? [];
         var forms = formPlaces.Select(ReadForm).ToArray();
         var stepPlaces = place.Need(properties, "steps")?.Items() ?? [];
-        if (id is null || name is null || forms.Length == 0 || forms.Contains(null))
+        if (id is null || name is null || forms.Length == 0 || forms.Any(form => form.Formula is null))
         {
             return null;
         }
 
-        var whole = forms.Select(form => form!).ToArray();
+        var whole = forms.Select(form => form.Formula!).ToArray();
         CheckLadder(id, whole, formPlaces, stepPlaces.Count, place);
         var steps = stepPlaces.Select((step, index) => ReadStep(step, id, index + 1)).ToArray();
         if (steps.Contains(null))
@@ -63,17 +63,19 @@ internal sealed class FamilyReader(SourcedValueReader values)
             Id = id,
             Name = name,
             Forms = whole,
+            SolubilitiesMolPerKg = forms.Select(form => form.Solubility).ToArray(),
             Steps = steps.Select(step => step!).ToArray(),
             Note = properties.TryGetValue("note", out var note) ? note.Text() ?? "" : "",
         };
     }
 
-    private static ChemicalFormula? ReadForm(JsonPlace place)
+    private (ChemicalFormula? Formula, SourcedValue? Solubility) ReadForm(JsonPlace place)
     {
-        var properties = place.Properties("formula");
+        var properties = place.Properties("formula", "solubility");
+        var solubility = values.ReadPositive(properties, "solubility");
         if (place.Need(properties, "formula") is not { } formulaPlace || formulaPlace.Text() is not { } text)
         {
-            return null;
+            return (null, solubility);
         }
 
         if (!ChemicalFormula.TryParse(text, out var formula, out var detail))
@@ -81,7 +83,7 @@ internal sealed class FamilyReader(SourcedValueReader values)
             place.Faults.Add(FaultKinds.TableBadFormula, formulaPlace.Path, text, ("detail", detail));
         }
 
-        return formula;
+        return (formula, solubility);
     }
 
     private DissociationStep? ReadStep(JsonPlace place, string family, int number)

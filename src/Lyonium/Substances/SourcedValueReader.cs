@@ -4,6 +4,7 @@ using System.Linq;
 using Lyonium.Documents;
 using Lyonium.Faults;
 using Lyonium.Provenance;
+using Lyonium.Quantities;
 
 namespace Lyonium.Substances;
 
@@ -32,6 +33,23 @@ internal sealed class SourcedValueReader
         var properties = place.Properties(
             "value", "standardUncertainty", "temperatureCelsius", "ionicStrength", "source", "known", "note");
         return Finish(place, properties, place.Need(properties, "value"), "standardUncertainty");
+    }
+
+    /// <summary>Reads an optional value that is above zero.</summary>
+    public SourcedValue? ReadPositive(IReadOnlyDictionary<string, JsonPlace> properties, string name)
+    {
+        if (!properties.TryGetValue(name, out var place) || Read(place) is not { } value)
+        {
+            return null;
+        }
+
+        if (value.Value > 0)
+        {
+            return value;
+        }
+
+        place.Faults.Add(FaultKinds.TableBadValue, place.Path, NumberText.Shortest(value.Value), ("detail", $"a {name} is above zero"));
+        return null;
     }
 
     /// <summary>Reads the source and the conditions that stand beside a number.</summary>

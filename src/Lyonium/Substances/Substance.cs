@@ -41,6 +41,12 @@ public sealed record Substance
     /// <summary>The density of its solutions; <see langword="null"/> where none is known.</summary>
     public SolutionDensities? SolutionDensities { get; init; }
 
+    /// <summary>
+    /// How much of it dissolves in pure water, in mol per kg of water, crystal water counted with the water; <see langword="null"/> where
+    /// none is listed.
+    /// </summary>
+    public SourcedValue? SolubilityMolPerKg { get; init; }
+
     /// <summary>The groups by which cautions find it.</summary>
     public IReadOnlyList<string> Groups { get; init; } = [];
 

@@ -3,7 +3,6 @@ using System.Collections.Generic;
 using System.Linq;
 using Lyonium.Documents;
 using Lyonium.Faults;
-using Lyonium.Provenance;
 using Lyonium.Quantities;
 
 namespace Lyonium.Substances;
@@ -30,7 +29,7 @@ internal sealed class SubstanceReader
     private Substance? ReadSubstance(JsonPlace place)
     {
         var properties = place.Properties(
-            "id", "name", "synonyms", "formula", "otherFormulas", "brings", "protons", "density", "molarVolume", "solutionDensities", "groups");
+            "id", "name", "synonyms", "formula", "otherFormulas", "brings", "protons", "density", "molarVolume", "solubility", "solutionDensities", "groups");
         var id = TableId.Read(place, properties);
         var name = TableText.Read(place, properties, "name");
         var synonyms = Texts(properties, "synonyms");
@@ -56,8 +55,9 @@ internal sealed class SubstanceReader
             CrystalWaterGPerMol = formula.CrystalWater * WaterMass,
             Brings = brings,
             Protons = given,
-            DensityKgPerL = ReadPositive(properties, "density"),
+            DensityKgPerL = _values.ReadPositive(properties, "density"),
             MolarVolumeMLPerMol = properties.TryGetValue("molarVolume", out var volume) ? _values.Read(volume) : null,
+            SolubilityMolPerKg = _values.ReadPositive(properties, "solubility"),
             SolutionDensities = ReadDensities(properties),
             Groups = Texts(properties, "groups"),
         };
@@ -180,22 +180,6 @@ internal sealed class SubstanceReader
                 formula.Text,
                 ("detail", $"{NumberText.Shortest(element.Value)} {element.Key} of the formula is not accounted for"));
         }
-    }
-
-    private SourcedValue? ReadPositive(IReadOnlyDictionary<string, JsonPlace> properties, string name)
-    {
-        if (!properties.TryGetValue(name, out var place) || _values.Read(place) is not { } value)
-        {
-            return null;
-        }
-
-        if (value.Value > 0)
-        {
-            return value;
-        }
-
-        place.Faults.Add(FaultKinds.TableBadValue, place.Path, NumberText.Shortest(value.Value), ("detail", "a density is above zero"));
-        return null;
     }
 
     private SolutionDensities? ReadDensities(IReadOnlyDictionary<string, JsonPlace> properties)

@@ -1,0 +1,27 @@
+using System;
+using System.Collections.Generic;
+using System.Linq;
+
+namespace Lyonium.Predictions;
+
+/// <summary>
+/// What the model leaves out: it knows one solution in which nothing but protons is exchanged. These are the checks that tell a mixture
+/// which does more, and the words for it.
+/// </summary>
+internal static class ModelScope
+{
+    public const string WithinListedSolubility = "within-listed-solubility";
+    public const string NoReactionButProtonExchange = "no-reaction-but-proton-exchange";
+    public const string MayNotDissolve = "may not dissolve";
+
+    /// <summary>Why a number is of the homogeneous model only; empty where it is not.</summary>
+    public static IReadOnlyList<string> Reasons(IEnumerable<Assumption> assumptions) =>
+        assumptions.Where(one => !one.Held).Select(ReasonOf).OfType<string>().Distinct(StringComparer.Ordinal).ToArray();
+
+    private static string? ReasonOf(Assumption one) => one.Code switch
+    {
+        WithinListedSolubility => MayNotDissolve,
+        NoReactionButProtonExchange => "consumes itself",
+        _ => null,
+    };
+}
