@@ -34,14 +34,14 @@ public sealed class BenchmarkCase
     }
 
     public static BenchmarkCase WeakAcidsAndStrong { get; } = new(
-        "three weak acids, one strong",
+        "3 weak, 1 strong",
         (0.02, 0, [3.75]),
         (0.05, 0, [4.756]),
         (0.01, 0, [9.24]),
         (0.001, -1, []));
 
     public static BenchmarkCase FourSteps { get; } = new(
-        "a four-step ladder",
+        "four-step ladder",
         (0.02, 0, [2.0, 2.68, 6.11, 10.17]),
         (0.05, 1, []));
 

@@ -14,7 +14,7 @@ internal static class Ratios
 
     public static void Print()
     {
-        Console.WriteLine($"{"mixture",-30}{"method",-32}{"µs",8}{"ratio",8}{"bytes",8}  pH");
+        Console.WriteLine($"{"mixture",-18}{"method",-32}{"µs",8}{"ratio",8}{"bytes",8}  pH");
         foreach (var mixture in BenchmarkCase.All)
         {
             (string Name, Func<double> Solve)[] methods =
@@ -40,7 +40,7 @@ internal static class Ratios
             {
                 Console.WriteLine(string.Create(
                     CultureInfo.InvariantCulture,
-                    $"{mixture.Name,-30}{methods[i].Name,-32}{medians[i],8:F2}{medians[i] / medians[0],8:F1}{Allocated(methods[i].Solve),8}  {methods[i].Solve():F9}"));
+                    $"{mixture.Name,-18}{methods[i].Name,-32}{medians[i],8:F2}{medians[i] / medians[0],8:F1}{Allocated(methods[i].Solve),8}  {methods[i].Solve():F9}"));
             }
         }
     }
