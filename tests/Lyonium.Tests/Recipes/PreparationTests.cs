@@ -1,6 +1,6 @@
 using System;
-using Lyonium.Records;
 using Lyonium.Recipes;
+using Lyonium.Records;
 using Lyonium.Substances;
 using Lyonium.Tests.Records;
 using Xunit;

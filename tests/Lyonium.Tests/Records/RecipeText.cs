@@ -3,8 +3,8 @@ using System.Collections.Generic;
 using System.IO;
 using System.Text;
 using Lyonium.Faults;
-using Lyonium.Records;
 using Lyonium.Recipes;
+using Lyonium.Records;
 using Lyonium.Substances;
 
 namespace Lyonium.Tests.Records;
