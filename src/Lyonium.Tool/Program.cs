@@ -16,7 +16,8 @@ try
     var parsed = root.Parse(args);
     if (parsed.Errors.Count == 0)
     {
-        return parsed.Invoke();
+        // The parser's own handler would print a stack trace.
+        return parsed.Invoke(new InvocationConfiguration { EnableDefaultExceptionHandler = false });
     }
 
     foreach (var error in parsed.Errors)
@@ -27,8 +28,26 @@ try
     Console.Error.WriteLine("Try 'lyonium --help'.");
     return ExitStatus.WrongCommandLine;
 }
-catch (IOException)
+catch (Exception e) when (e is IOException or UnauthorizedAccessException)
 {
-    // The reader of a pipe went away; there is nobody left to tell.
-    return ExitStatus.Done;
+    // A reader that went away is no error here and never comes to this; a full disk does.
+    return Say("the output cannot be written: " + e.Message, ExitStatus.Refused);
+}
+catch (Exception e) when (e is not OutOfMemoryException)
+{
+    return Say($"an internal error, please report it: {e.GetType().Name}: {e.Message}", ExitStatus.NoAnswer);
+}
+
+static int Say(string text, int status)
+{
+    try
+    {
+        Console.Error.WriteLine("lyonium: " + PlainText.Of(text));
+    }
+    catch (Exception e) when (e is IOException or UnauthorizedAccessException)
+    {
+        // Nobody can be told.
+    }
+
+    return status;
 }

@@ -9,20 +9,21 @@ namespace Lyonium.Documents;
 /// <summary>Opens JSON text strictly: of bounded size and depth, without comments and trailing commas.</summary>
 internal static class JsonDocumentReader
 {
-    private const int DeepestNesting = 64;
+    /// <summary>How deep a document may nest.</summary>
+    public const int DeepestNesting = 64;
 
     private static readonly UTF8Encoding StrictUtf8 = new(encoderShouldEmitUTF8Identifier: false, throwOnInvalidBytes: true);
 
     /// <summary>Opens a document from text.</summary>
     /// <returns>The root, or <see langword="null"/> with the fault told.</returns>
-    public static JsonPlace? Open(string text, int mostBytes, FaultList faults)
+    public static JsonPlace? Open(string text, int mostBytes, FaultList faults, int deepest = DeepestNesting)
     {
         if (text.Length > mostBytes || Encoding.UTF8.GetByteCount(text) > mostBytes)
         {
             return TooLarge(mostBytes, text.Length, faults);
         }
 
-        return Open(Encoding.UTF8.GetBytes(text), faults);
+        return Open(Encoding.UTF8.GetBytes(text), faults, deepest);
     }
 
     /// <summary>Opens a document from a stream, of which no more than the limit is read.</summary>
@@ -44,10 +45,10 @@ internal static class JsonDocumentReader
             }
         }
 
-        return Open(bytes.ToArray(), faults);
+        return Open(bytes.ToArray(), faults, DeepestNesting);
     }
 
-    private static JsonPlace? Open(byte[] bytes, FaultList faults)
+    private static JsonPlace? Open(byte[] bytes, FaultList faults, int deepest)
     {
         if (!IsUtf8(bytes))
         {
@@ -59,7 +60,7 @@ internal static class JsonDocumentReader
         try
         {
             using var document = JsonDocument.Parse(
-                bytes.AsMemory(start), new JsonDocumentOptions { MaxDepth = DeepestNesting, CommentHandling = JsonCommentHandling.Disallow });
+                bytes.AsMemory(start), new JsonDocumentOptions { MaxDepth = deepest, CommentHandling = JsonCommentHandling.Disallow });
             return new JsonPlace(document.RootElement.Clone(), "$", faults);
         }
         catch (JsonException e)

@@ -49,7 +49,10 @@ public sealed class RecordReplay
     {
         const int mostBytes = 64 * 1024 * 1024;
         var faults = new FaultList();
-        var root = JsonDocumentReader.Open(json ?? throw new ArgumentNullException(nameof(json)), mostBytes, faults);
+
+        // The recipe stands one level deeper than where it was read.
+        const int deepest = JsonDocumentReader.DeepestNesting + 1;
+        var root = JsonDocumentReader.Open(json ?? throw new ArgumentNullException(nameof(json)), mostBytes, faults, deepest);
         if (root is null || !DocumentFormat.Check(root, "lyonium-record", "1"))
         {
             return faults.Attempt<ReplayReport>(null);

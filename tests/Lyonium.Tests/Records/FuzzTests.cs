@@ -1,6 +1,7 @@
 using System;
 using System.Collections.Generic;
 using System.Diagnostics;
+using System.Globalization;
 using System.IO;
 using System.Linq;
 using System.Text;
@@ -17,7 +18,10 @@ namespace Lyonium.Tests.Records;
 public sealed class FuzzTests
 {
     private const int Mutations = 20_000;
-    private const int Seed = 20_261_201;
+
+    // Another seed can be tried with LYONIUM_FUZZ_SEED; a failure prints the one that it had.
+    private static readonly int Seed =
+        int.TryParse(Environment.GetEnvironmentVariable("LYONIUM_FUZZ_SEED"), NumberStyles.None, CultureInfo.InvariantCulture, out var own) ? own : 20_261_201;
 
     private static readonly string[] Tokens =
     [

@@ -162,6 +162,37 @@ public sealed class PredictToolTests : IDisposable
         Assert.Empty(ToolRun.WithClosedPipe("predict", file).ErrorLines);
     }
 
+    [Theory]
+    [InlineData("> /dev/full")]
+    [InlineData(">&-")]
+    public void Predict_ontoAFullDiskOrAClosedOutput_saysSoInALine(string redirection)
+    {
+        if (!File.Exists("/dev/full"))
+        {
+            return;
+        }
+
+        foreach (var format in new[] { "text", "json" })
+        {
+            var run = ToolRun.InShell($"{redirection} exec", "predict", Write(RecipeText.OfTheContract), "--format", format);
+
+            Assert.Equal(1, run.ExitStatus);
+            Assert.StartsWith("lyonium: the output cannot be written: ", Assert.Single(run.ErrorLines), StringComparison.Ordinal);
+        }
+    }
+
+    [Fact]
+    public void Predict_withClosedErrors_keepsItsStatus()
+    {
+        if (!File.Exists("/dev/full"))
+        {
+            return;
+        }
+
+        Assert.Equal(1, ToolRun.InShell("2>&- exec", "predict", "no such file").ExitStatus);
+        Assert.Equal(1, ToolRun.InShell("2>/dev/full exec", "predict", "no such file").ExitStatus);
+    }
+
     private string Write(string text)
     {
         var file = Path.Combine(_folder, "recipe.json");

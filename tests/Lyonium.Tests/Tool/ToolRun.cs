@@ -16,13 +16,16 @@ internal sealed record ToolRun(int ExitStatus, string Output, string Errors)
 
     public static ToolRun Of(params string[] arguments) => Run(arguments, input: null, isOutputClosed: false);
 
+    /// <summary>Through the shell, with something before the command, such as a redirection.</summary>
+    public static ToolRun InShell(string before, params string[] arguments) => Run(arguments, input: null, isOutputClosed: false, before);
+
     public static ToolRun WithInput(string input, params string[] arguments) => Run(arguments, input, isOutputClosed: false);
 
     public static ToolRun WithClosedPipe(params string[] arguments) => Run(arguments, input: null, isOutputClosed: true);
 
-    private static ToolRun Run(string[] arguments, string? input, bool isOutputClosed)
+    private static ToolRun Run(string[] arguments, string? input, bool isOutputClosed, string? shell = null)
     {
-        var start = new ProcessStartInfo("dotnet")
+        var start = new ProcessStartInfo(shell is null ? "dotnet" : "/bin/sh")
         {
             UseShellExecute = false,
             RedirectStandardInput = true,
@@ -32,6 +35,13 @@ internal sealed record ToolRun(int ExitStatus, string Output, string Errors)
             StandardOutputEncoding = Encoding.UTF8,
             StandardErrorEncoding = Encoding.UTF8,
         };
+        if (shell is not null)
+        {
+            start.ArgumentList.Add("-c");
+            start.ArgumentList.Add(shell + " dotnet \"$@\"");
+            start.ArgumentList.Add("sh");
+        }
+
         start.ArgumentList.Add(Path.Combine(AppContext.BaseDirectory, "Lyonium.Tool.dll"));
         foreach (var argument in arguments)
         {
