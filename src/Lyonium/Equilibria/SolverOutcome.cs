@@ -3,39 +3,6 @@ using System.Collections.Generic;
 
 namespace Lyonium.Equilibria;
 
-/// <summary>How a method ended.</summary>
-public enum SolverStatus
-{
-    /// <summary>There is an answer.</summary>
-    Solved,
-
-    /// <summary>The method does not solve species over more than one component.</summary>
-    CoupledSpecies,
-
-    /// <summary>The method does not solve a component at a fixed activity.</summary>
-    FixedActivity,
-
-    /// <summary>The method does not apply to this equilibrium.</summary>
-    DoesNotApply,
-
-    /// <summary>The method did not settle on an answer.</summary>
-    NotSettled,
-}
-
-/// <summary>One thing a method took for granted, in numbers.</summary>
-/// <param name="Code">A stable word for it.</param>
-/// <param name="Component">The index of the component it is about; −1 for the whole solution.</param>
-/// <param name="Figure">How large it is here.</param>
-/// <param name="Limit">Up to where it is taken to hold.</param>
-/// <param name="Held">Whether it held.</param>
-/// <param name="Basis">Where the limit comes from.</param>
-public sealed record SolverAssumption(string Code, int Component, double Figure, double Limit, bool Held, string Basis);
-
-/// <summary>One estimate of a method that repeats itself.</summary>
-/// <param name="PH">The estimate.</param>
-/// <param name="Correction">How far it moved from the one before.</param>
-public sealed record Iterate(double PH, double Correction);
-
 /// <summary>What a solver hands back, in numbers.</summary>
 /// <remarks>Immutable; safe to share between threads.</remarks>
 public readonly record struct SolverOutcome

@@ -4,11 +4,6 @@ using System.Linq;
 
 namespace Lyonium.Equilibria;
 
-/// <summary>How many of a component a species is made of.</summary>
-/// <param name="Component">The index of the component.</param>
-/// <param name="Count">How many of it, one or more.</param>
-public readonly record struct Term(int Component, int Count);
-
 /// <summary>A dissolved species: what it is made of, its charge, and its formation constant.</summary>
 /// <remarks>
 /// The reaction is Σ count · component + protons · H⁺ = species. Immutable; safe to share between threads.

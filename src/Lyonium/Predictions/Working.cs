@@ -35,25 +35,3 @@ public sealed record Working
     /// <returns>Some lines, each ended by a line feed.</returns>
     public string ToText() => WorkingText.Write(this);
 }
-
-/// <summary>One dissociation and its mass action.</summary>
-/// <param name="Id">The id of the step, such as <c>citrate:1</c>.</param>
-/// <param name="Equation">The reaction.</param>
-/// <param name="MassAction">The mass-action expression in molalities.</param>
-/// <param name="PKa">The pKa at infinite dilution.</param>
-/// <param name="K">The constant in mol/kg at the ionic strength of the answer: Ka with the activity coefficients in it.</param>
-/// <param name="Quotient">The mass-action expression with the molalities of the answer put in, in mol/kg; equal to K.</param>
-public sealed record WorkedReaction(string Id, string Equation, string MassAction, double PKa, double K, double Quotient);
-
-/// <summary>The molality of a species before and after the protons settle.</summary>
-/// <param name="Species">The formula.</param>
-/// <param name="StartMolPerKg">
-/// After strong and weak have neutralised each other and before anything dissociates, in mol/kg; <see langword="null"/> where the steps
-/// have no order.
-/// </param>
-/// <param name="EquilibriumMolPerKg">At the answer, in mol/kg.</param>
-public sealed record WorkedAmount(string Species, double? StartMolPerKg, double EquilibriumMolPerKg)
-{
-    /// <summary>The change from start to equilibrium, in mol/kg.</summary>
-    public double? ChangeMolPerKg => EquilibriumMolPerKg - StartMolPerKg;
-}

@@ -102,8 +102,3 @@ public sealed class Mixture
         return new Mixture(Recipe, Table, [part], part.WaterKg, part.VolumeL, part.MassKg, estimatedWaterKg: 0);
     }
 }
-
-/// <summary>How much of a substance is in a mixture.</summary>
-/// <param name="Substance">The substance.</param>
-/// <param name="AmountMol">The amount, in mol.</param>
-public sealed record SubstanceAmount(Substance Substance, double AmountMol);

@@ -104,19 +104,18 @@ public sealed class MeasureTests
     [Fact]
     public void ToString_anyDouble_readsBackToTheSameDouble()
     {
-        Gen.Double[0, 1e300].Sample(
+        Gen.Double[0, 1e300].Check(
             value =>
             {
                 var text = value.ToString("R", CultureInfo.InvariantCulture) + " kg";
                 var measure = Measure.Parse(text, Dimension.Mass);
                 var again = Measure.Parse(measure.ToString(), Dimension.Mass);
-                return BitConverter.DoubleToInt64Bits(measure.Value) == BitConverter.DoubleToInt64Bits(value)
-                    && BitConverter.DoubleToInt64Bits(again.Value) == BitConverter.DoubleToInt64Bits(value)
-                    && measure.Equals(again)
-                    && measure.GetHashCode() == again.GetHashCode();
+                Assert.Equal(BitConverter.DoubleToInt64Bits(value), BitConverter.DoubleToInt64Bits(measure.Value));
+                Assert.Equal(BitConverter.DoubleToInt64Bits(value), BitConverter.DoubleToInt64Bits(again.Value));
+                Assert.Equal(measure, again);
+                Assert.Equal(measure.GetHashCode(), again.GetHashCode());
             },
-            iter: 5000,
-            seed: "0000KJhY8Qa2");
+            iter: 5000);
     }
 
     [Fact]

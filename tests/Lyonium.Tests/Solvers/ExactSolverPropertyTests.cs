@@ -14,7 +14,7 @@ public sealed class ExactSolverPropertyTests
 
     [Fact]
     public void Solve_components_in_another_order_same_answer() =>
-        AnyMixture.Select(Gen.Int[0, int.MaxValue]).Sample(
+        Gen.Select(AnyMixture, Gen.Int[0, int.MaxValue]).Check(
             (mixture, seed) =>
             {
                 var order = mixture.Ladders.ToArray();
@@ -27,7 +27,7 @@ public sealed class ExactSolverPropertyTests
 
     [Fact]
     public void Solve_component_split_in_two_same_answer() =>
-        AnyMixture.Sample(
+        AnyMixture.Check(
             mixture =>
             {
                 var first = mixture.Ladders[0];
@@ -40,7 +40,7 @@ public sealed class ExactSolverPropertyTests
 
     [Fact]
     public void Solve_more_strong_acid_never_a_higher_pH() =>
-        Gen.Select(AnyMixture, Gen.Double[-9, 0.7]).Sample(
+        Gen.Select(AnyMixture, Gen.Double[-9, 0.7]).Check(
             (mixture, log10Added) =>
             {
                 var before = Solving.Ideally(mixture);
@@ -52,7 +52,7 @@ public sealed class ExactSolverPropertyTests
     // The mirror image: acids and bases, h and hydroxide change places, so pH becomes pKw − pH.
     [Fact]
     public void Solve_mirrored_mixture_mirrored_pH() =>
-        AnyMixture.Sample(
+        AnyMixture.Check(
             mixture =>
             {
                 var mirrored = new MixtureInput(mixture.Ladders

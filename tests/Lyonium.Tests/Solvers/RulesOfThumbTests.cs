@@ -27,7 +27,7 @@ public sealed class RulesOfThumbTests
     public void Weak_acid_beside_a_strong_one_moves_the_pH_by_no_more_than_the_rule_says()
     {
         var moved = 0;
-        Gen.Select(Gen.Double[2, 9], Gen.Double[-4, 0], Gen.Double[-4, 0]).Sample(
+        Gen.Select(Gen.Double[2, 9], Gen.Double[-4, 0], Gen.Double[-4, 0]).Check(
             (pK, log10Weak, log10Strong) =>
             {
                 var strong = MixtureInput.Of(new LadderInput(Math.Pow(10, log10Strong), -1));
@@ -45,8 +45,7 @@ public sealed class RulesOfThumbTests
                     Assert.InRange(outcome.PH - Solving.Ideally(both).PH, -1e-12, rule + (Math.Pow(10, -14 - (2 * log10Strong)) / Math.Log(10)) + 1e-12);
                 }
             },
-            iter: 2000,
-            threads: 1);
+            iter: 2000);
         Assert.True(moved > 200, "Too few of the mixtures moved for the test to mean anything: " + moved);
     }
 

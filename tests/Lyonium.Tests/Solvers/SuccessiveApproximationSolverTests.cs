@@ -21,7 +21,7 @@ public sealed class SuccessiveApproximationSolverTests
 
     // Common practice: x ← √(K (c − x)) from x = √(K c).
     [Fact]
-    public void Solve_one_weak_acid_iterates_of_the_formula_by_hand() => Acids.Sample(
+    public void Solve_one_weak_acid_iterates_of_the_formula_by_hand() => Acids.Check(
         acid =>
         {
             var (k, c, outcome) = Solve(acid.PK, acid.Ratio);
@@ -38,7 +38,7 @@ public sealed class SuccessiveApproximationSolverTests
     // Each side closes in on the answer; with c from 1.25 K on each iterate is nearer than the one before as well (at 1.25 K by hand, in
     // units of K: 1.118, 0.363, 0.942 around 0.725).
     [Fact]
-    public void Solve_one_weak_acid_iterates_fall_on_both_sides_in_turn_and_close_in() => Acids.Sample(
+    public void Solve_one_weak_acid_iterates_fall_on_both_sides_in_turn_and_close_in() => Acids.Check(
         acid =>
         {
             var (k, c, outcome) = Solve(acid.PK, acid.Ratio, significantFigures: 10);
