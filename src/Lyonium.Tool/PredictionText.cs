@@ -162,7 +162,7 @@ internal sealed class PredictionText(Prediction prediction)
             Row(
                 grid,
                 one.Quantity + " " + one.Id,
-                $"{NumberFormat.Short(one.Value.Value)}{uncertainty} at {one.Value.Conditions ?? "no stated temperature"}  [{one.Value.Source.Key}, {one.Value.KnownAs}]");
+                $"{NumberFormat.Short(one.Value.Value)}{uncertainty} at {one.Value.Conditions ?? "no stated temperature"}  [{one.Value.Source.Key}, {one.Value.KnownAs}{(one.Layer is null ? "" : "; " + PlainText.Of(one.Layer))}]");
         }
 
         if (!double.IsNaN(evidence.BracketLow))
@@ -172,6 +172,11 @@ internal sealed class PredictionText(Prediction prediction)
         }
 
         Row(grid, "table", $"edition {evidence.Table.Edition}, SHA-256 {evidence.Table.Sha256[..16]}…");
+        foreach (var layer in evidence.Table.Layers)
+        {
+            Row(grid, "own table", $"{PlainText.Of(layer.Name)}, edition {PlainText.Of(layer.Edition)}, SHA-256 {layer.Sha256[..16]}…");
+        }
+
         Row(grid, "software", $"Lyonium {evidence.Software.Version}, {evidence.Software.Target}, {evidence.Software.ProcessArchitecture}");
         console.Write(grid);
     }

@@ -19,7 +19,7 @@ public sealed class BowerBates1955Tests(ITestOutputHelper output)
     private const string File = "bower-bates-1955.csv";
 
     private const string Bar =
-        "0.03, the bar of issue 2: the Davies equation may miss the coefficient of the hydrogen ion by some 0.02 at 0.15 mol/kg, and x is "
+        "0.03, the bar set for this library: the Davies equation may miss the coefficient of the hydrogen ion by some 0.02 at 0.15 mol/kg, and x is "
         + "printed to 0.1 mL, which is 0.006 at 7.8 mL";
 
     private static readonly Predictor Davies = new();

@@ -11,7 +11,7 @@ namespace Lyonium.PublishedValues;
 /// <summary>A pH standard: what it is made of, and the two ways of making it.</summary>
 public sealed class StandardSolution(PublishedRow composition)
 {
-    /// <summary>The bar of issue 2 for the standards at 25 °C with the Davies equation.</summary>
+    /// <summary>The bar for the standards at 25 °C with the Davies equation.</summary>
     public const string ReasonForTolerance =
         "0.015, and 0.025 for carbonate and tris: a careful calculation reproduces the standards within 0.02 at 25 degC, and the Davies "
         + "equation gives all ions of a charge one coefficient; a value printed to two decimals adds the half digit 0.005";

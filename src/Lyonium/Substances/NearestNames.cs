@@ -24,8 +24,9 @@ internal static class NearestNames
         var folded = NameFolding.Fold(wanted);
         var farthest = Math.Min(Farthest, Math.Max(2, folded.Length / 3));
         return names
-            .Where(name => Math.Abs(name.Length - folded.Length) <= farthest + Slack)
-            .Select(name => (Name: name, Distance: Distance(folded, NameFolding.Fold(name), farthest)))
+            .SelectMany(name => Spellings(name).Select(spelling => (Name: name, Spelling: spelling)))
+            .Where(one => Math.Abs(one.Spelling.Length - folded.Length) <= farthest + Slack)
+            .Select(one => (one.Name, Distance: Distance(folded, NameFolding.Fold(one.Spelling), farthest)))
             .Where(one => one.Distance <= farthest)
             .OrderBy(one => one.Distance)
             .ThenBy(one => one.Name, StringComparer.Ordinal)
@@ -33,6 +34,17 @@ internal static class NearestNames
             .Distinct(StringComparer.Ordinal)
             .Take(3)
             .ToArray();
+    }
+
+    // People leave out what goes without saying: oxalic for oxalic acid.
+    private static IEnumerable<string> Spellings(string name)
+    {
+        const string acid = " acid";
+        yield return name;
+        if (name.EndsWith(acid, StringComparison.Ordinal))
+        {
+            yield return name.Substring(0, name.Length - acid.Length);
+        }
     }
 
     // The distance, or some number above the farthest that is looked for.

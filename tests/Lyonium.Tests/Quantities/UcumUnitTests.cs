@@ -8,7 +8,7 @@ using Xunit;
 
 namespace Lyonium.Tests.Quantities;
 
-/// <summary>The codes of vocabulary.md, and what one of each is in the unit that the library computes in.</summary>
+/// <summary>The unit codes of the JSON contract, and what one of each is in the unit that the library computes in.</summary>
 public sealed class UcumUnitTests
 {
     // typed text, UCUM code written out, dimension, power of ten to the computed unit

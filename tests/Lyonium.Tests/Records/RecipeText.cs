@@ -12,7 +12,7 @@ namespace Lyonium.Tests.Records;
 /// <summary>Recipes as JSON text, written short.</summary>
 internal static class RecipeText
 {
-    /// <summary>The recipe of recipe-format.md, but for the recipe poured into it, which comes later.</summary>
+    /// <summary>A recipe with one part of each kind, but for a recipe poured into it.</summary>
     public const string OfTheContract = """
         {
           "format": "lyonium-recipe/1",

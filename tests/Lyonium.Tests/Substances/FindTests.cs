@@ -5,7 +5,7 @@ using Xunit;
 
 namespace Lyonium.Tests.Substances;
 
-/// <summary>Look-up: the names of recipe-format.md, trade synonyms, formulas, and what is not found.</summary>
+/// <summary>Look-up: the names that must be understood, trade synonyms, formulas, and what is not found.</summary>
 public sealed class FindTests
 {
     private static SubstanceTable Table => SubstanceTable.Default;
@@ -150,4 +150,10 @@ public sealed class FindTests
 
     [Fact]
     public void Find_null_throws() => Assert.Throws<ArgumentNullException>(() => Table.Find(null!));
+
+    [Theory]
+    [InlineData("oxlaic", "oxalic acid")]
+    [InlineData("acetc", "acetic acid")]
+    public void Find_misspelt_without_the_word_acid_suggests_the_acid(string wanted, string nearest) =>
+        Assert.Contains($"'{nearest}'", Assert.Single(SubstanceTable.Default.Find(wanted).Faults).Remedy, System.StringComparison.Ordinal);
 }
