@@ -44,7 +44,7 @@ public static class FaultKinds
 
     /// <summary>More text than is read.</summary>
     public static FaultKind TooLarge { get; } = new(
-        "LYO0202", "too large", "The text is larger than {limit}.", "split it into recipes of at most {limit} each");
+        "LYO0202", "too large", "The text is larger than {limit}.", "split it into documents of at most {limit} each");
 
     /// <summary>A document of another format.</summary>
     public static FaultKind WrongFormat { get; } = new(

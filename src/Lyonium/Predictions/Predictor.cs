@@ -94,6 +94,7 @@ public sealed class Predictor
     }
 
     /// <summary>Predicts a recipe with every method of the library side by side, and with this predictor's own.</summary>
+    /// <remarks>A name stands once: the row <c>exact</c> is the library's, and any other name this predictor's own where it has that name.</remarks>
     /// <param name="recipe">The recipe.</param>
     /// <param name="tolerance">How far from the exact answer still counts as right, in pH, above 0.</param>
     /// <returns>The comparison, or every fault of the recipe.</returns>
@@ -121,7 +122,7 @@ public sealed class Predictor
         var others = Methods.All.Append(Method)
             .GroupBy(method => method.Name, StringComparer.Ordinal)
             .Select(group => group.Last())
-            .Where(method => method is not ExactSolver)
+            .Where(method => !string.Equals(method.Name, exact.Value.Method, StringComparison.Ordinal))
             .Select(method => ComparisonRow.Of(method.Name, With(method).TryPredict(mixture.Value), exact.Value, tolerance));
         var rows = others.Prepend(ComparisonRow.Of(exact.Value.Method, exact, exact.Value, tolerance)).ToArray();
         return new Attempt<Comparison>(new Comparison(recipe, ActivityModel.Name, tolerance, rows));

@@ -252,7 +252,7 @@ internal sealed class RecipeDraft
     {
         if (purity is not null && !(purity.Computed > 0 && purity.Computed <= 1.1))
         {
-            Faults.Add(FaultKinds.OutOfRange, NextPath + ".purity", purity.ToString(), ("expected", "purity"), ("low", "above 0 %"), ("high", "110 %"));
+            Faults.Add(FaultKinds.OutOfRange, NextPath + ".purity", purity.ToString(), ("expected", "purity"), ("low", "0 %"), ("high", "110 %"));
         }
     }
 

@@ -26,15 +26,11 @@ internal static class SubstanceTableReader
     public static Attempt<SubstanceTable> Read(Stream stream)
     {
         var faults = new FaultList();
-        using var copy = new MemoryStream();
-        var root = JsonDocumentReader.Open(stream, MostBytes, faults, copy);
-        if (root is null || !DocumentFormat.Check(root, "lyonium-table", "1"))
+        if (Open(stream, faults) is not var (root, properties, edition, sha256))
         {
             return faults.Attempt<SubstanceTable>(null);
         }
 
-        var properties = root.Properties(Sections);
-        var edition = TableText.Read(root, properties, "edition");
         var values = new SourcedValueReader(ReadSources(root.Need(properties, "sources"), faults));
         var weights = ReadElements(root.Need(properties, "elements"), values);
         var families = new FamilyReader(values).Read(root.Need(properties, "families"));
@@ -42,22 +38,18 @@ internal static class SubstanceTableReader
         return faults.Any || edition is null
             ? faults.Attempt<SubstanceTable>(null)
             : new Attempt<SubstanceTable>(new SubstanceTable(
-                new TableIdentity(edition, Fingerprint.Of(copy.ToArray()), []), values.Sources, weights, families, substances));
+                new TableIdentity(edition, sha256, []), values.Sources, weights, families, substances));
     }
 
     /// <summary>Reads a user's own table and lays it over another: what it has replaces what is below, the rest stays.</summary>
     public static Attempt<SubstanceTable> ReadLayer(Stream stream, string name, SubstanceTable below)
     {
         var faults = new FaultList();
-        using var copy = new MemoryStream();
-        var root = JsonDocumentReader.Open(stream, MostBytes, faults, copy);
-        if (root is null || !DocumentFormat.Check(root, "lyonium-table", "1"))
+        if (Open(stream, faults) is not var (root, properties, edition, sha256))
         {
             return faults.Attempt<SubstanceTable>(null);
         }
 
-        var properties = root.Properties(Sections);
-        var edition = TableText.Read(root, properties, "edition");
         var ownSources = ReadSources(Optional(properties, "sources"), faults);
         var values = new SourcedValueReader(Over(below.Sources, ownSources, source => source.Key));
         var weights = Over(below.AtomicWeights, ReadElements(Optional(properties, "elements"), values), one => one.Symbol);
@@ -73,10 +65,24 @@ internal static class SubstanceTableReader
             return faults.Attempt<SubstanceTable>(null);
         }
 
-        var layer = new TableLayer(name, edition, Fingerprint.Of(copy.ToArray()));
+        var layer = new TableLayer(name, edition, sha256);
         var identity = below.Identity with { Layers = [.. below.Identity.Layers, layer] };
         return new Attempt<SubstanceTable>(
             new SubstanceTable(identity, values.Sources, weights, families, Over(kept, own, one => one.Id)));
+    }
+
+    private static (JsonPlace Root, IReadOnlyDictionary<string, JsonPlace> Properties, string? Edition, string Sha256)? Open(
+        Stream stream, FaultList faults)
+    {
+        using var bytes = new MemoryStream();
+        var root = JsonDocumentReader.Open(stream, MostBytes, faults, bytes);
+        if (root is null || !DocumentFormat.Check(root, "lyonium-table", "1"))
+        {
+            return null;
+        }
+
+        var properties = root.Properties(Sections);
+        return (root, properties, TableText.Read(root, properties, "edition"), Fingerprint.Of(bytes.ToArray()));
     }
 
     private static JsonPlace? Optional(IReadOnlyDictionary<string, JsonPlace> properties, string name) =>

@@ -1,5 +1,6 @@
 using System.Linq;
 using Lyonium.Conformance;
+using Lyonium.Equilibria;
 using Lyonium.Predictions;
 using Lyonium.Recipes;
 using OwnMethod;
@@ -33,4 +34,19 @@ public sealed class OwnMethodTests
     [Fact]
     public void Check_method_of_the_guide_passes_the_conformance_kit() =>
         Assert.Equal([], SolverConformance.Check(new HalvingSolver()).Where(one => !one.Passed).Select(one => one.ToString()));
+
+    [Fact]
+    public void Compare_with_a_method_that_calls_itself_exact_has_one_row_of_that_name()
+    {
+        var comparison = new Predictor().With(new NamedExact()).TryCompare(Vinegar).Value;
+        Assert.Equal(["exact", "successive-approximation", "dominant-acid"], comparison.Rows.Select(row => row.Method));
+        Assert.Equal(new Predictor().Predict(Vinegar).PH, comparison.Rows[0].PH);
+    }
+
+    private sealed class NamedExact : ISolver
+    {
+        public string Name => "exact";
+
+        public SolverOutcome Solve(Equilibrium equilibrium, IActivityModel model) => SolverOutcome.Answer(7);
+    }
 }
