@@ -20,7 +20,7 @@ internal static class Plugins
         var option = new Option<string>("--activity")
         {
             Description = "the model of activity coefficients",
-            DefaultValueFactory = _ => ActivityModels.All[0].Name,
+            DefaultValueFactory = _ => ActivityModels.Default.Name,
         };
         option.AcceptOnlyFromAmong([.. ActivityModels.All.Select(one => one.Name)]);
         return option;

@@ -9,7 +9,18 @@ namespace Lyonium.Activity;
 public static class ActivityModels
 {
     /// <summary>All of them, the default first.</summary>
-    public static IReadOnlyList<IActivityModel> All { get; } = Array.AsReadOnly<IActivityModel>([new DaviesModel(), new IdealModel()]);
+    public static IReadOnlyList<IActivityModel> All { get; } = Array.AsReadOnly<IActivityModel>(
+    [
+        new BatesGuggenheimModel(),
+        new DaviesModel(),
+        new DebyeHuckelExtendedModel(),
+        new GuntelbergModel(),
+        new DebyeHuckelLimitingModel(),
+        new IdealModel(),
+    ]);
+
+    /// <summary>The default: the Bates–Guggenheim convention for every ion, which the pH standards favour.</summary>
+    public static IActivityModel Default => All[0];
 
     /// <summary>Finds a model.</summary>
     /// <param name="name">Its name, such as <c>davies</c>.</param>

@@ -17,18 +17,15 @@ public sealed class DaviesModel : IActivityModel
     public double HighestIonicStrengthMolPerKg => 0.5;
 
     /// <inheritdoc/>
+    public bool UsesIonSizes => false;
+
+    /// <inheritdoc/>
     public string Source => "C. W. Davies, Ion Association, Butterworths, London (1962)";
 
     /// <inheritdoc/>
     public void Log10Gammas(Equilibrium equilibrium, double ionicStrengthMolPerKg, ReadOnlySpan<double> molalities, Span<double> log10Gammas)
     {
-        _ = equilibrium ?? throw new ArgumentNullException(nameof(equilibrium));
         var root = Math.Sqrt(ionicStrengthMolPerKg);
-        var perSquareCharge = -equilibrium.Solvent.DebyeHuckelA * ((root / (1 + root)) - (0.3 * ionicStrengthMolPerKg));
-        var charges = equilibrium.Charges;
-        for (var i = 0; i < charges.Length; i++)
-        {
-            log10Gammas[i] = perSquareCharge * charges[i] * charges[i];
-        }
+        SquareChargeLaw.Fill(equilibrium, (root / (1 + root)) - (0.3 * ionicStrengthMolPerKg), log10Gammas);
     }
 }

@@ -1,5 +1,6 @@
 using System;
 using System.Globalization;
+using System.Linq;
 using Lyonium.Faults;
 
 namespace Lyonium.Documents;
@@ -11,37 +12,42 @@ internal static class DocumentFormat
     /// <param name="root">The document.</param>
     /// <param name="name">The name of the format before the slash.</param>
     /// <param name="version">The version after the slash.</param>
-    public static bool Check(JsonPlace root, string name, string version)
+    public static bool Check(JsonPlace root, string name, string version) => VersionOf(root, name, version) is not null;
+
+    /// <summary>The version of the document, where it is one of those that are read; a later one is told apart from another format.</summary>
+    /// <param name="root">The document.</param>
+    /// <param name="name">The name of the format before the slash.</param>
+    /// <param name="versions">The versions after the slash, the latest last.</param>
+    public static string? VersionOf(JsonPlace root, string name, params string[] versions)
     {
-        var expected = name + "/" + version;
         if (!root.IsObject)
         {
             root.Properties();
-            return false;
+            return null;
         }
 
         // Only the format is looked at: a later version may have properties that are not known here.
         if (root.Find("format") is not { } place)
         {
             root.Faults.Add(FaultKinds.MissingProperty, root.Path, "", ("property", "format"));
-            return false;
+            return null;
         }
 
         if (place.Text() is not { } found)
         {
-            return false;
+            return null;
         }
 
-        if (string.Equals(found, expected, StringComparison.Ordinal))
+        if (Array.Find(versions, version => string.Equals(found, name + "/" + version, StringComparison.Ordinal)) is { } known)
         {
-            return true;
+            return known;
         }
 
         var kind = found.StartsWith(name + "/", StringComparison.Ordinal) && IsVersion(found.Substring(name.Length + 1))
             ? FaultKinds.FormatTooNew
             : FaultKinds.WrongFormat;
-        root.Faults.Add(kind, place.Path, found, ("expected", expected));
-        return false;
+        root.Faults.Add(kind, place.Path, found, ("expected", string.Join(" or ", versions.Select(version => name + "/" + version))));
+        return null;
     }
 
     private static bool IsVersion(string text) =>

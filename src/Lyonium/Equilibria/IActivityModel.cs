@@ -15,6 +15,12 @@ public interface IActivityModel
     /// <summary>The ionic strength in mol/kg above which a prediction is flagged as outside the model's range.</summary>
     double HighestIonicStrengthMolPerKg { get; }
 
+    /// <summary>
+    /// Whether the coefficients depend on the ion-size parameters of the species: a prediction then lists the sizes with their sources, and
+    /// the ions whose size is not known.
+    /// </summary>
+    bool UsesIonSizes { get; }
+
     /// <summary>The published source of the equation, as a citation.</summary>
     string Source { get; }
 

@@ -170,10 +170,6 @@ public static class FaultKinds
     public static FaultKind NestedTooDeep { get; } = new(
         "LYO0413", "nested too deep", "Recipes are poured into each other over {found} levels, and at most {limit} are taken.", "pour the parts of the innermost recipes themselves");
 
-    /// <summary>A mixture at a temperature at which the constants do not hold yet.</summary>
-    public static FaultKind TemperatureNotModelled { get; } = new(
-        "LYO0501", "temperature not modelled", "The pH is asked for at {found}, and the constants hold at 25 Cel: their change with temperature is not built yet.", "ask for 25 Cel");
-
     /// <summary>A recipe with a substance that the predictor's table does not have.</summary>
     public static FaultKind NotInThisTable { get; } = new(
         "LYO0502", "substance not in this table", "The recipe's substance '{found}' is not in edition {edition} of the table.", "predict with the table that the recipe was built with");
@@ -219,7 +215,7 @@ public static class FaultKinds
         TableStepOutOfOrder, TableDuplicate, TableMissingSource, TableBadFormula, TableBadLadder, TableNotBalanced, TableUnknownFamily, TableBadValue, TableChangesBase,
         EmptyRecipe, Contradictory, Incomplete, UnknownStock, DuplicateName, MarkBelowContents, NeedsDensity, StrongerThanPossible, NoWater,
         TooManyParts, MoreThanTheRecipeMakes, MixtureOverflows, NestedTooDeep,
-        TemperatureNotModelled, NotInThisTable,
+        NotInThisTable,
         CoupledSpecies, FixedActivity, MethodDoesNotApply, DidNotSettle, MethodFailed,
         FileNotFound, IsAFolder, CannotRead,
     ];

@@ -7,7 +7,6 @@ using Lyonium.Faults;
 using Lyonium.Quantities;
 using Lyonium.Recipes;
 using Lyonium.Substances;
-using Lyonium.Water;
 
 namespace Lyonium.Modelling;
 
@@ -18,59 +17,29 @@ namespace Lyonium.Modelling;
 /// </remarks>
 internal sealed class Doorway(Mixture mixture, IActivityModel model)
 {
-    private const double ConstantsHoldAtK = 298.15;
+    /// <summary>The temperature in K; that of the mixture unless another is set.</summary>
+    public double TemperatureK { get; init; } = mixture.TemperatureK;
+
+    /// <summary>The ion-size parameter in ångström of ions whose size is not listed; NaN leaves it to the activity model.</summary>
+    public double SizeOfUnlistedIons { get; init; } = double.NaN;
 
     public Attempt<ModelledMixture> Run()
     {
-        if (Math.Abs(mixture.TemperatureK - ConstantsHoldAtK) > 1e-6)
-        {
-            var found = mixture.Recipe.Temperature?.ToString() ?? NumberText.Shortest(mixture.TemperatureK) + " K";
-            return new Attempt<ModelledMixture>([Fault.Of(FaultKinds.TemperatureNotModelled, "$.temperature", found)]);
-        }
-
         var totals = Totals();
         var families = totals.Select(one => one.Family).ToArray();
-        var solvent = SolventAt(mixture.TemperatureK);
-        var constraints = totals.Select(one => Constraint.Total(one.MolPerKg)).ToArray();
-        var asPublished = new Equilibrium(constraints, SpeciesOf(families, step => step.PKa.Value), solvent);
-        var infiniteDilution = new InfiniteDilution(asPublished, model, families);
-        var equilibrium = infiniteDilution.IsNeeded
-            ? new Equilibrium(constraints, SpeciesOf(families, infiniteDilution.PKa), solvent)
-            : asPublished;
+        var constants = new StepConstants(families, model, TemperatureK);
+        var equilibrium = new Equilibrium(
+            totals.Select(one => Constraint.Total(one.MolPerKg)).ToArray(),
+            families.SelectMany((family, component) => FamilySpecies.Of(family, component, constants.PKa, SizeOfUnlistedIons)).ToArray(),
+            WaterConstants.SolventAt(TemperatureK),
+            WaterConstants.HydrogenIonSize.Value,
+            WaterConstants.HydroxideIonSize.Value);
         return new Attempt<ModelledMixture>(
-            new ModelledMixture(mixture, equilibrium, families, Describe(totals), Constants(families, infiniteDilution)));
+            new ModelledMixture(mixture, equilibrium, families, Describe(totals), Constants(families, constants)));
     }
 
     /// <summary>The id of the species of a family that holds so many protons more than the base form.</summary>
     internal static string SpeciesId(Family family, int protons) => family.Id + ":" + protons.ToString(CultureInfo.InvariantCulture);
-
-    private static Solvent SolventAt(double temperatureK)
-    {
-        var slopes = DebyeHuckelSlopes.At(temperatureK);
-        return new Solvent(temperatureK, WaterIonization.PKw(temperatureK), slopes.A, slopes.B);
-    }
-
-    private static List<Species> SpeciesOf(Family[] families, Func<DissociationStep, double> pKa)
-    {
-        var species = new List<Species>();
-        for (var component = 0; component < families.Length; component++)
-        {
-            var family = families[component];
-            double log10K = 0;
-            for (var protons = 0; protons < family.Forms.Count; protons++)
-            {
-                if (protons > 0)
-                {
-                    log10K += pKa(family.Steps[family.Steps.Count - protons]);
-                }
-
-                var form = family.Forms[family.Forms.Count - 1 - protons];
-                species.Add(new Species([new Term(component, 1)], protons, form.Charge, log10K));
-            }
-        }
-
-        return species;
-    }
 
     private (Family Family, double MolPerKg)[] Totals() =>
         mixture.Amounts
@@ -99,19 +68,16 @@ internal sealed class Doorway(Mixture mixture, IActivityModel model)
         return species;
     }
 
-    private List<UsedConstant> Constants(Family[] families, InfiniteDilution infiniteDilution)
+    private List<UsedConstant> Constants(Family[] families, StepConstants steps)
     {
-        var constants = new List<UsedConstant>();
-        foreach (var (step, layer) in families.SelectMany(family => family.Steps.Select(step => (step, family.Layer))))
+        var constants = families.SelectMany(family => family.Steps.SelectMany(step => steps.Describe(step, family.Layer))).ToList();
+        constants.AddRange(WaterConstants.At(TemperatureK, mixture.Recipe.PreparedAtK));
+        if (model.UsesIonSizes)
         {
-            constants.Add(new UsedConstant(step.Id, "pKa", step.PKa, layer));
-            if (step.PKa.IonicStrengthMolPerKg > 0)
-            {
-                constants.Add(new UsedConstant(step.Id, "pKa at infinite dilution", infiniteDilution.Describe(step), layer));
-            }
+            constants.AddRange(WaterConstants.IonSizes(TemperatureK));
+            constants.AddRange(families.SelectMany(IonSizes));
         }
 
-        constants.AddRange(WaterConstants.At(mixture.TemperatureK, mixture.Recipe.PreparedAtK));
         constants.AddRange(mixture.Parts.Where(part => part.TableDensity is not null)
             .GroupBy(part => part.Substance!.Id + NumberText.Shortest(part.TableDensity!.Value), StringComparer.Ordinal)
             .Select(group => new UsedConstant(group.First().Substance!.Id, "density of the solution in kg/L", group.First().TableDensity!, group.First().Substance!.Layer)));
@@ -119,4 +85,10 @@ internal sealed class Doorway(Mixture mixture, IActivityModel model)
             .Select(one => new UsedConstant(one.Substance.Id, "molar volume in solution in mL/mol", one.Substance.MolarVolumeMLPerMol!, one.Substance.Layer)));
         return constants;
     }
+
+    private static IEnumerable<UsedConstant> IonSizes(Family family) =>
+        family.IonSizesAngstrom
+            .Select((size, form) => (Size: size, Id: SpeciesId(family, family.Forms.Count - 1 - form)))
+            .Where(one => one.Size is not null)
+            .Select(one => new UsedConstant(one.Id, WaterConstants.IonSizeQuantity, one.Size!, family.Layer));
 }

@@ -41,7 +41,7 @@ public sealed class ModelledMixture
     public IReadOnlyList<UsedConstant> Constants { get; }
 
     /// <summary>Models a mixture.</summary>
-    /// <param name="mixture">The mixture, at 25 °C.</param>
+    /// <param name="mixture">The mixture; its temperature lies within 0 to 100 °C.</param>
     /// <param name="model">The model of activity coefficients; it carries constants of another ionic strength to infinite dilution.</param>
     /// <returns>The numeric problem, or every fault.</returns>
     /// <exception cref="ArgumentNullException">A parameter is <see langword="null"/>.</exception>

@@ -1,4 +1,5 @@
 using System.Collections.Generic;
+using Lyonium.Equilibria;
 using Lyonium.Provenance;
 using Lyonium.Water;
 
@@ -10,6 +11,30 @@ internal static class WaterConstants
     private static readonly Source Slopes = new(
         "debye-huckel-from-iapws",
         "Debye-Hückel limiting slope computed from the density (IAPWS SR6-08) and the permittivity (IAPWS R8-97) of water with CODATA 2018 constants");
+
+    private static readonly Source Kielland = new(
+        "kielland-1937", "J. Kielland, J. Am. Chem. Soc. 59 (1937) 1675");
+
+    public const string IonSizeQuantity = "ion-size parameter in Å";
+
+    /// <summary>The ion-size parameter of the hydrogen ion, in ångström.</summary>
+    public static SourcedValue HydrogenIonSize { get; } = new(9, Kielland, Known.Memory);
+
+    /// <summary>The ion-size parameter of the hydroxide ion, in ångström.</summary>
+    public static SourcedValue HydroxideIonSize { get; } = new(3.5, Kielland, Known.Memory);
+
+    public static Solvent SolventAt(double temperatureK)
+    {
+        var slopes = DebyeHuckelSlopes.At(temperatureK);
+        return new Solvent(temperatureK, WaterIonization.PKw(temperatureK), slopes.A, slopes.B);
+    }
+
+    public static IEnumerable<UsedConstant> IonSizes(double temperatureK) =>
+    [
+        new("water", "Debye-Hückel B in (kg/mol)^½/Å", Of(DebyeHuckelSlopes.At(temperatureK).B, Slopes, Known.Derived, temperatureK), null),
+        new("water:2", IonSizeQuantity, HydrogenIonSize, null),
+        new("water:0", IonSizeQuantity, HydroxideIonSize, null),
+    ];
 
     public static IEnumerable<UsedConstant> At(double temperatureK, double preparedAtK) =>
     [

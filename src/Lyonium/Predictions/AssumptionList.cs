@@ -1,7 +1,9 @@
 using System;
 using System.Collections.Generic;
 using System.Linq;
+using Lyonium.Quantities;
 using Lyonium.Recipes;
+using Lyonium.Substances;
 
 namespace Lyonium.Predictions;
 
@@ -75,15 +77,42 @@ internal sealed class AssumptionList(SolvedMixture answer, Predictor predictor, 
                     "published at this ionic strength; carried with " + predictor.ActivityModel.Name);
             }
 
-            const double nearK = 0.5;
-            var away = Math.Abs((one.Value.TemperatureK ?? Mixture.TemperatureK) - Mixture.TemperatureK);
-            if (away > nearK)
+        }
+
+        foreach (var step in answer.Modelled.Families.SelectMany(family => family.Steps))
+        {
+            if (OffItsTemperature(step) is { } flag)
             {
-                yield return new Assumption(
-                    "constant-at-its-temperature", one.Id, away, nearK, Held: false, "published at another temperature, and used as it is");
+                yield return flag;
             }
         }
     }
+
+    // A constant near its own temperature needs no course; one with a course may be carried as far as the course was published.
+    private Assumption? OffItsTemperature(DissociationStep step)
+    {
+        const double nearK = 0.5;
+        var away = Math.Abs(step.PublishedAtK - Mixture.TemperatureK);
+        if (away <= nearK)
+        {
+            return null;
+        }
+
+        if (!step.ChangesWithTemperature)
+        {
+            return new Assumption(
+                "constant-at-its-temperature", step.Id, away, nearK, Held: false, "published at another temperature, and used as it is");
+        }
+
+        var beyond = step.ValidRange?.Beyond(Mixture.TemperatureK) ?? 0;
+        return beyond > 0
+            ? new Assumption(
+                "constant-within-its-temperature-range", step.Id, beyond, 0, Held: false, $"carried beyond {RangeText(step.ValidRange!)}: an extrapolation")
+            : null;
+    }
+
+    private static string RangeText(TemperatureRange range) =>
+        $"{NumberText.Shortest(Math.Round(range.LowK - 273.15, 2))} to {NumberText.Shortest(Math.Round(range.HighK - 273.15, 2))} Cel";
 
     private IEnumerable<Assumption> OfTheWater()
     {

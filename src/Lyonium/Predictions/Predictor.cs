@@ -14,7 +14,7 @@ namespace Lyonium.Predictions;
 /// <remarks>Immutable and thread-safe; make one and share it.</remarks>
 public sealed class Predictor
 {
-    /// <summary>Makes a predictor with the defaults: the built-in table, the exact method, the Davies equation.</summary>
+    /// <summary>Makes a predictor with the defaults: the built-in table, the exact method, the Bates–Guggenheim convention for every ion.</summary>
     public Predictor()
         : this(SubstanceTable.Default)
     {
@@ -23,13 +23,13 @@ public sealed class Predictor
     /// <summary>Makes a predictor.</summary>
     /// <param name="table">The table of substances.</param>
     /// <param name="method">The method; <see langword="null"/> for the exact one.</param>
-    /// <param name="activityModel">The model of activity coefficients; <see langword="null"/> for the Davies equation.</param>
+    /// <param name="activityModel">The model of activity coefficients; <see langword="null"/> for <see cref="ActivityModels.Default"/>.</param>
     /// <exception cref="ArgumentNullException"><paramref name="table"/> is <see langword="null"/>.</exception>
     public Predictor(SubstanceTable table, ISolver? method = null, IActivityModel? activityModel = null)
     {
         Table = table ?? throw new ArgumentNullException(nameof(table));
         Method = method ?? new ExactSolver();
-        ActivityModel = activityModel ?? new DaviesModel();
+        ActivityModel = activityModel ?? ActivityModels.Default;
     }
 
     /// <summary>The table of substances.</summary>

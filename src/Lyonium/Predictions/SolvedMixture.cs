@@ -25,11 +25,15 @@ internal sealed class SolvedMixture
     public Speciation Speciation { get; }
 
     /// <summary>Models a mixture and runs the method, and turns whatever it and the activity model do into an answer or a fault.</summary>
-    public static Attempt<SolvedMixture> TrySolve(Mixture mixture, ISolver method, IActivityModel model)
+    public static Attempt<SolvedMixture> TrySolve(Mixture mixture, ISolver method, IActivityModel model) =>
+        TrySolve(new Doorway(mixture, model), method, model);
+
+    /// <summary>The same through a doorway that has been set otherwise.</summary>
+    public static Attempt<SolvedMixture> TrySolve(Doorway doorway, ISolver method, IActivityModel model)
     {
         try
         {
-            var attempt = ModelledMixture.TryModel(mixture, model);
+            var attempt = doorway.Run();
             if (!attempt.Success)
             {
                 return new Attempt<SolvedMixture>(attempt.Faults);

@@ -22,6 +22,11 @@ public sealed record Family
     /// </summary>
     public IReadOnlyList<SourcedValue?> SolubilitiesMolPerKg { get; init; } = [];
 
+    /// <summary>
+    /// The ion-size parameter of each form, in ångström, in the order of <see cref="Forms"/>; <see langword="null"/> where none is listed.
+    /// </summary>
+    public IReadOnlyList<SourcedValue?> IonSizesAngstrom { get; init; } = [];
+
     /// <summary>The steps between the forms, the most acidic first; one fewer than forms.</summary>
     public required IReadOnlyList<DissociationStep> Steps { get; init; }
 

@@ -10,8 +10,12 @@ using Lyonium.Quantities;
 namespace Lyonium.Substances;
 
 /// <summary>Reads the families of a table and holds their ladders to one proton a form and rising pKa.</summary>
-internal sealed class FamilyReader(SourcedValueReader values)
+internal sealed class FamilyReader(SourcedValueReader values, string version)
 {
+    private static readonly string[] FormProperties = ["formula", "solubility"];
+    private static readonly string[] LaterFormProperties = [.. FormProperties, "ionSize"];
+    private readonly StepReader _steps = new(values, version);
+
     public IReadOnlyList<Family> Read(JsonPlace? list)
     {
         var families = new List<Family>();
@@ -51,7 +55,7 @@ internal sealed class FamilyReader(SourcedValueReader values)
 
         var whole = forms.Select(form => form.Formula!).ToArray();
         CheckLadder(id, whole, formPlaces, stepPlaces.Count, place);
-        var steps = stepPlaces.Select((step, index) => ReadStep(step, id, index + 1)).ToArray();
+        var steps = stepPlaces.Select((step, index) => _steps.Read(step, id, index + 1)).ToArray();
         if (steps.Contains(null))
         {
             return null;
@@ -64,18 +68,20 @@ internal sealed class FamilyReader(SourcedValueReader values)
             Name = name,
             Forms = whole,
             SolubilitiesMolPerKg = forms.Select(form => form.Solubility).ToArray(),
+            IonSizesAngstrom = forms.Select(form => form.IonSize).ToArray(),
             Steps = steps.Select(step => step!).ToArray(),
             Note = properties.TryGetValue("note", out var note) ? note.Text() ?? "" : "",
         };
     }
 
-    private (ChemicalFormula? Formula, SourcedValue? Solubility) ReadForm(JsonPlace place)
+    private (ChemicalFormula? Formula, SourcedValue? Solubility, SourcedValue? IonSize) ReadForm(JsonPlace place)
     {
-        var properties = place.Properties("formula", "solubility");
+        var properties = place.Properties(string.Equals(version, "1", StringComparison.Ordinal) ? FormProperties : LaterFormProperties);
         var solubility = values.ReadPositive(properties, "solubility");
+        var ionSize = values.ReadPositive(properties, "ionSize");
         if (place.Need(properties, "formula") is not { } formulaPlace || formulaPlace.Text() is not { } text)
         {
-            return (null, solubility);
+            return (null, solubility, ionSize);
         }
 
         if (!ChemicalFormula.TryParse(text, out var formula, out var detail))
@@ -83,41 +89,7 @@ internal sealed class FamilyReader(SourcedValueReader values)
             place.Faults.Add(FaultKinds.TableBadFormula, formulaPlace.Path, text, ("detail", detail));
         }
 
-        return (formula, solubility);
-    }
-
-    private DissociationStep? ReadStep(JsonPlace place, string family, int number)
-    {
-        var properties = place.Properties("pKa", "enthalpy", "heatCapacity", "alternatives", "reason");
-        var pKa = values.Read(place.Need(properties, "pKa"));
-        var alternatives = (properties.TryGetValue("alternatives", out var others) ? others.Items() : []).Select(values.Read).OfType<SourcedValue>().ToArray();
-        var reason = properties.TryGetValue("reason", out var why) ? why.Text() ?? "" : "";
-        if (alternatives.Length > 0 && reason.Length == 0)
-        {
-            place.Faults.Add(FaultKinds.MissingProperty, place.Path, "", ("property", "reason"));
-        }
-
-        if (pKa is null)
-        {
-            return null;
-        }
-
-        if (Math.Abs(pKa.Value) > 50)
-        {
-            place.Faults.Add(
-                FaultKinds.TableBadValue, place.Path + ".pKa", NumberText.Shortest(pKa.Value), ("detail", "a pKa lies between -50 and 50"));
-        }
-
-        return new DissociationStep
-        {
-            Id = family + ":" + number.ToString(CultureInfo.InvariantCulture),
-            Number = number,
-            PKa = pKa,
-            EnthalpyKJPerMol = properties.TryGetValue("enthalpy", out var enthalpy) ? values.Read(enthalpy) : null,
-            HeatCapacityJPerMolK = properties.TryGetValue("heatCapacity", out var capacity) ? values.Read(capacity) : null,
-            Alternatives = alternatives,
-            Reason = reason,
-        };
+        return (formula, solubility, ionSize);
     }
 
     private static void CheckLadder(string id, ChemicalFormula[] forms, IReadOnlyList<JsonPlace> places, int steps, JsonPlace family)

@@ -26,14 +26,14 @@ internal static class SubstanceTableReader
     public static Attempt<SubstanceTable> Read(Stream stream)
     {
         var faults = new FaultList();
-        if (Open(stream, faults) is not var (root, properties, edition, sha256))
+        if (Open(stream, faults) is not var (root, properties, version, edition, sha256))
         {
             return faults.Attempt<SubstanceTable>(null);
         }
 
         var values = new SourcedValueReader(ReadSources(root.Need(properties, "sources"), faults));
         var weights = ReadElements(root.Need(properties, "elements"), values);
-        var families = new FamilyReader(values).Read(root.Need(properties, "families"));
+        var families = new FamilyReader(values, version).Read(root.Need(properties, "families"));
         var substances = new SubstanceReader(values, families, weights, new TakenNames()).Read(root.Need(properties, "substances"));
         return faults.Any || edition is null
             ? faults.Attempt<SubstanceTable>(null)
@@ -45,7 +45,7 @@ internal static class SubstanceTableReader
     public static Attempt<SubstanceTable> ReadLayer(Stream stream, string name, SubstanceTable below)
     {
         var faults = new FaultList();
-        if (Open(stream, faults) is not var (root, properties, edition, sha256))
+        if (Open(stream, faults) is not var (root, properties, version, edition, sha256))
         {
             return faults.Attempt<SubstanceTable>(null);
         }
@@ -53,7 +53,7 @@ internal static class SubstanceTableReader
         var ownSources = ReadSources(Optional(properties, "sources"), faults);
         var values = new SourcedValueReader(Over(below.Sources, ownSources, source => source.Key));
         var weights = Over(below.AtomicWeights, ReadElements(Optional(properties, "elements"), values), one => one.Symbol);
-        var ownFamilies = new FamilyReader(values).Read(Optional(properties, "families")).Select(one => one with { Layer = name }).ToArray();
+        var ownFamilies = new FamilyReader(values, version).Read(Optional(properties, "families")).Select(one => one with { Layer = name }).ToArray();
         CheckBases(ownFamilies, below, root);
         var families = Over(below.Families, ownFamilies, one => one.Id);
         var kept = below.Substances.Select(one => one.With(families)).ToArray();
@@ -71,18 +71,18 @@ internal static class SubstanceTableReader
             new SubstanceTable(identity, values.Sources, weights, families, Over(kept, own, one => one.Id)));
     }
 
-    private static (JsonPlace Root, IReadOnlyDictionary<string, JsonPlace> Properties, string? Edition, string Sha256)? Open(
+    private static (JsonPlace Root, IReadOnlyDictionary<string, JsonPlace> Properties, string Version, string? Edition, string Sha256)? Open(
         Stream stream, FaultList faults)
     {
         using var bytes = new MemoryStream();
         var root = JsonDocumentReader.Open(stream, MostBytes, faults, bytes);
-        if (root is null || !DocumentFormat.Check(root, "lyonium-table", "1"))
+        if (root is null || DocumentFormat.VersionOf(root, "lyonium-table", "1", "1.1") is not { } version)
         {
             return null;
         }
 
         var properties = root.Properties(Sections);
-        return (root, properties, TableText.Read(root, properties, "edition"), Fingerprint.Of(bytes.ToArray()));
+        return (root, properties, version, TableText.Read(root, properties, "edition"), Fingerprint.Of(bytes.ToArray()));
     }
 
     private static JsonPlace? Optional(IReadOnlyDictionary<string, JsonPlace> properties, string name) =>

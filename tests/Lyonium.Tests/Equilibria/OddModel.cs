@@ -12,6 +12,8 @@ internal sealed class OddModel(OddModel.Rule rule) : IActivityModel
 
     public double HighestIonicStrengthMolPerKg => 1;
 
+    public bool UsesIonSizes => false;
+
     public string Source => "a test";
 
     public void Log10Gammas(Equilibrium equilibrium, double ionicStrengthMolPerKg, ReadOnlySpan<double> molalities, Span<double> log10Gammas)

@@ -161,6 +161,8 @@ public sealed class SpeciationTests
 
         public double HighestIonicStrengthMolPerKg => 1;
 
+        public bool UsesIonSizes => false;
+
         public string Source => "a test";
 
         public void Log10Gammas(Equilibrium equilibrium, double ionicStrengthMolPerKg, ReadOnlySpan<double> molalities, Span<double> log10Gammas)

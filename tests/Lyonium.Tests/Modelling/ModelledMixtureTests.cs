@@ -117,14 +117,6 @@ public sealed class ModelledMixtureTests
     }
 
     [Fact]
-    public void TryModel_atAnotherTemperature_isRefused()
-    {
-        var mixture = Mixture.Prepare(RecipeJson.Read(RecipeText.With(Kilogram, "\"temperature\": \"37 Cel\"")), SubstanceTable.Default);
-
-        Assert.Equal(["LYO0501 $.temperature"], FaultText.CodesAndPaths(ModelledMixture.TryModel(mixture, new DaviesModel()).Faults));
-    }
-
-    [Fact]
     public void TryModel_null_throws()
     {
         Assert.Throws<ArgumentNullException>(() => ModelledMixture.TryModel(null!, new DaviesModel()));

@@ -30,17 +30,17 @@ public sealed class AssumptionTests
     }
 
     [Theory]
-    [InlineData("0.4 mol", true)]
-    [InlineData("0.6 mol", false)]
-    public void Davies_isFlaggedAboveHalfAMolPerKilogram(string amount, bool held)
+    [InlineData("0.09 mol", true)]
+    [InlineData("0.11 mol", false)]
+    public void IonicStrength_isFlaggedAboveTheRangeOfTheModel(string amount, bool held)
     {
         var one = One(Of($"{{ \"substance\": \"NaCl\", \"amount\": \"{amount}\" }}, " + Kilogram), "ionic-strength-in-range");
 
         Assert.Equal(held, one.Held);
-        Assert.Equal(0.5, one.Limit);
-        Assert.Equal("davies", one.Of);
-        Assert.Equal(held ? 0.4 : 0.6, one.Figure!.Value, 1e-6);
-        Assert.Contains("Davies", one.Basis, StringComparison.Ordinal);
+        Assert.Equal(0.1, one.Limit);
+        Assert.Equal("bates-guggenheim", one.Of);
+        Assert.Equal(held ? 0.09 : 0.11, one.Figure!.Value, 1e-6);
+        Assert.Contains("Guggenheim", one.Basis, StringComparison.Ordinal);
     }
 
     [Fact]

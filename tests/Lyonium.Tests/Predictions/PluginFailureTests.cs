@@ -149,6 +149,8 @@ public sealed class PluginFailureTests
 
         public double HighestIonicStrengthMolPerKg => 1;
 
+        public bool UsesIonSizes => false;
+
         public string Source => "none";
 
         public void Log10Gammas(Equilibrium equilibrium, double ionicStrengthMolPerKg, ReadOnlySpan<double> molalities, Span<double> log10Gammas) =>

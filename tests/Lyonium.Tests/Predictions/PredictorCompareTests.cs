@@ -29,7 +29,7 @@ public sealed class PredictorCompareTests
         var comparison = new Predictor().TryCompare(Close).GetValueOrThrow();
 
         Assert.Equal(Methods, comparison.Rows.Select(row => row.Method));
-        Assert.Equal(("davies", 0.02), (comparison.ActivityModel, comparison.Tolerance));
+        Assert.Equal(("bates-guggenheim", 0.02), (comparison.ActivityModel, comparison.Tolerance));
         Assert.Same(Close, comparison.Recipe);
     }
 

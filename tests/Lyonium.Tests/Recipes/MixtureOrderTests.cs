@@ -19,7 +19,7 @@ public sealed class MixtureOrderTests
         "oxalic acid", "EDTA", "NaCl", "potassium dihydrogen phosphate", "glycine", "HCl", "NaOH", "H2SO4", "Ca(OH)2", "sodium tetraborate decahydrate",
     ];
 
-    private static readonly Predictor Davies = new();
+    private static readonly Predictor Default = new();
     private static readonly Predictor Ideal = new Predictor().With(new IdealModel());
 
     [Fact]
@@ -30,7 +30,7 @@ public sealed class MixtureOrderTests
         for (var i = 0; i < 150; i++)
         {
             var parts = Enumerable.Range(0, random.Next(2, 9)).Select(_ => Part(random)).Append("{ \"substance\": \"water\", \"volume\": \"1 L\" }").ToArray();
-            var predictor = i % 2 == 0 ? Davies : Ideal;
+            var predictor = i % 2 == 0 ? Default : Ideal;
             var one = predictor.Predict(RecipeJson.Read(RecipeText.With(string.Join(", ", parts))));
             random.Shuffle(parts);
             var other = predictor.Predict(RecipeJson.Read(RecipeText.With(string.Join(", ", parts))));
@@ -56,11 +56,11 @@ public sealed class MixtureOrderTests
             "{ \"substance\": \"tris\", \"amount\": \"0.25 mol\" }", "{ \"substance\": \"acetic acid\", \"amount\": \"0.03125 mol\" }",
         ];
         var random = new Random(3);
-        var expected = Davies.Predict(RecipeJson.Read(RecipeText.With(string.Join(", ", parts)))).PH;
+        var expected = Default.Predict(RecipeJson.Read(RecipeText.With(string.Join(", ", parts)))).PH;
         for (var i = 0; i < 20; i++)
         {
             random.Shuffle(parts);
-            Assert.Equal(BitConverter.DoubleToInt64Bits(expected), BitConverter.DoubleToInt64Bits(Davies.Predict(RecipeJson.Read(RecipeText.With(string.Join(", ", parts)))).PH));
+            Assert.Equal(BitConverter.DoubleToInt64Bits(expected), BitConverter.DoubleToInt64Bits(Default.Predict(RecipeJson.Read(RecipeText.With(string.Join(", ", parts)))).PH));
         }
     }
 
@@ -74,10 +74,10 @@ public sealed class MixtureOrderTests
             string Scaled(double by) => RecipeText.With(
                 string.Join(", ", amounts.Select(one => $"{{ \"substance\": \"{one.Name}\", \"amount\": \"{NumberText.Shortest(one.Mol * by)} mol\" }}"))
                 + $", {{ \"substance\": \"water\", \"mass\": \"{NumberText.Shortest(by)} kg\" }}");
-            var one = Davies.TryPredict(RecipeJson.Read(Scaled(1)));
+            var one = Default.TryPredict(RecipeJson.Read(Scaled(1)));
             foreach (var by in new[] { 1e-6, 0.3, 7, 1e6 })
             {
-                var other = Davies.TryPredict(RecipeJson.Read(Scaled(by)));
+                var other = Default.TryPredict(RecipeJson.Read(Scaled(by)));
                 Assert.True(one.Success == other.Success, $"answered {one.Success}, and times {by} {other.Success}: {Scaled(by)}");
                 if (one.Success)
                 {
@@ -95,7 +95,7 @@ public sealed class MixtureOrderTests
         string Of(params int[] volumes) =>
             RecipeText.With(string.Join(", ", volumes.Select(one => stock.Replace("#", one.ToString(CultureInfo.InvariantCulture), StringComparison.Ordinal))) + water);
 
-        Assert.Equal(Davies.Predict(RecipeJson.Read(Of(30))).PH, Davies.Predict(RecipeJson.Read(Of(10, 20))).PH, 1e-12);
+        Assert.Equal(Default.Predict(RecipeJson.Read(Of(30))).PH, Default.Predict(RecipeJson.Read(Of(10, 20))).PH, 1e-12);
     }
 
     [Fact]

@@ -54,7 +54,7 @@ public sealed class ComparisonSchemaTests
         Assert.Equal("lyonium-comparison/1", (string?)written["format"]);
         Assert.Equal("TQ-FM-03", (string?)written["id"]);
         Assert.Equal(0.05, (double)written["tolerance"]!);
-        Assert.Equal("davies", (string?)written["activityModel"]);
+        Assert.Equal("bates-guggenheim", (string?)written["activityModel"]);
         foreach (var (row, text) in comparison.Rows.Zip(written["rows"]!.AsArray()))
         {
             Assert.Equal(row.Method, (string?)text!["method"]);

@@ -28,7 +28,7 @@ public sealed class RecordJsonTests
     {
         Assert.Equal("lyonium-record/1", Record.GetProperty("format").GetString());
         Assert.Equal("exact", Record.GetProperty("method").GetString());
-        Assert.Equal("davies", Record.GetProperty("activityModel").GetString());
+        Assert.Equal("bates-guggenheim", Record.GetProperty("activityModel").GetString());
         Assert.Equal("two decimals", Record.GetProperty("reported").GetProperty("rule").GetString());
         Assert.Equal(Predicted.Reported, Record.GetProperty("reported").GetProperty("pH").GetString());
         var evidence = Record.GetProperty("evidence");

@@ -48,7 +48,7 @@ public sealed class RecordReplayTests
     [Fact]
     public void TryReplay_changed_pH_is_told()
     {
-        var record = Record("buffer.json", "exact", "davies");
+        var record = Record("buffer.json", "exact", "bates-guggenheim");
         var pH = new Predictor().Predict(RecipeJson.Read(Example("buffer.json"))).PH;
         var changed = record.Replace(FormattableString.Invariant($"\"pH\": {pH:R},"), "\"pH\": 7.25,", StringComparison.Ordinal);
         Assert.NotEqual(record, changed);
@@ -64,7 +64,7 @@ public sealed class RecordReplayTests
     {
         var pH = new Predictor().Predict(RecipeJson.Read(Example("buffer.json"))).PH;
         var nearly = FormattableString.Invariant($"\"pH\": {pH + 5e-10:R},");
-        var record = Record("buffer.json", "exact", "davies").Replace(FormattableString.Invariant($"\"pH\": {pH:R},"), nearly, StringComparison.Ordinal);
+        var record = Record("buffer.json", "exact", "bates-guggenheim").Replace(FormattableString.Invariant($"\"pH\": {pH:R},"), nearly, StringComparison.Ordinal);
 
         Assert.False(Replay.TryReplay(record).Value.Agrees);
         var older = Replay.TryReplay(record.Replace("\"target\": \"net10.0\"", "\"target\": \"netstandard2.0\"", StringComparison.Ordinal)).Value;
@@ -76,7 +76,7 @@ public sealed class RecordReplayTests
     {
         var table = Layer.TryOver(SubstanceTable.Default, Layer.With(Layer.Family("formate", ["HCOOH", "HCOO^-"], Layer.Step(3.7)))).Value;
 
-        var report = new RecordReplay(table).TryReplay(Record("weak-acids-close.json", "exact", "davies")).Value;
+        var report = new RecordReplay(table).TryReplay(Record("weak-acids-close.json", "exact", "bates-guggenheim")).Value;
 
         var paths = report.Differences.Select(one => one.Path).ToArray();
         Assert.Contains("$.pH", paths);
@@ -98,7 +98,7 @@ public sealed class RecordReplayTests
     [Fact]
     public void TryReplay_of_a_method_that_is_not_known_names_those_that_are()
     {
-        var record = Record("buffer.json", "exact", "davies").Replace("\"method\": \"exact\"", "\"method\": \"guess\"", StringComparison.Ordinal);
+        var record = Record("buffer.json", "exact", "bates-guggenheim").Replace("\"method\": \"exact\"", "\"method\": \"guess\"", StringComparison.Ordinal);
 
         var fault = Assert.Single(Replay.TryReplay(record).Faults);
 

@@ -239,7 +239,7 @@ public sealed class UserTableTests
     [InlineData("null", "LYO0208")]
     [InlineData("{}", "LYO0207")]
     [InlineData("{ \"format\": \"lyonium-recipe/1\" }", "LYO0203")]
-    [InlineData("{ \"format\": \"lyonium-table/1.1\" }", "LYO0204")]
+    [InlineData("{ \"format\": \"lyonium-table/1.2\" }", "LYO0204")]
     public void TryRead_whatIsNoTable_isRefused(string json, string code)
     {
         var attempt = UserTable.Read(json);
