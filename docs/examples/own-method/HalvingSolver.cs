@@ -1,3 +1,4 @@
+using System;
 using Lyonium.Equilibria;
 
 namespace OwnMethod;
@@ -14,6 +15,19 @@ public sealed class HalvingSolver : ISolver
             return SolverOutcome.Without(SolverStatus.DoesNotApply, "only mixtures without ion pairs are halved");
         }
 
+        try
+        {
+            return Halve(equilibrium, model);
+        }
+        catch (ArithmeticException noCoefficients)
+        {
+            // Far beyond its range a model may have no coefficients that agree with their own ionic strength.
+            return SolverOutcome.Without(SolverStatus.NotSettled, noCoefficients.Message);
+        }
+    }
+
+    private static SolverOutcome Halve(Equilibrium equilibrium, IActivityModel model)
+    {
         double low = -3, high = 17;
         if (Charge(low) < 0 || Charge(high) > 0)
         {

@@ -75,10 +75,10 @@ internal sealed class Sensitivity
             }
 
             Follow(molalities, change.AddedIonicStrength, miss);
-            double largest = 0, largestMiss = 0, alongLast = 0, size = 0;
+            double drive = Math.Abs(lnActivity), largestMiss = 0, alongLast = 0, size = 0;
             for (var i = 0; i < miss.Length; i++)
             {
-                largest = Math.Max(largest, Math.Abs(miss[i]));
+                drive = Math.Max(drive, Math.Abs(direct[i]));
                 miss[i] -= lnGammas[i];
                 largestMiss = Math.Max(largestMiss, Math.Abs(miss[i]));
                 var turn = miss[i] - lastMiss[i];
@@ -86,7 +86,7 @@ internal sealed class Sensitivity
                 size += turn * turn;
             }
 
-            if (largestMiss <= Consistent * largest)
+            if (largestMiss <= Consistent * drive)
             {
                 return -lnActivity / Ln10;
             }
@@ -115,7 +115,7 @@ internal sealed class Sensitivity
     }
 
     // What a change does to ln of each species, the hydrogen-ion activity, the totals' shares and the consistent coefficients held.
-    private void Direct(in Change change, double[] logs)
+    private static void Direct(in Change change, double[] logs)
     {
         for (var i = 0; i < change.Log10K.Length; i++)
         {
@@ -172,12 +172,13 @@ internal sealed class Sensitivity
     private void Follow(double[] change, double addedIonicStrength, double[] lnGammas)
     {
         const double smallStep = 1e-5;
+        const double traceOfIonicStrength = 1e-3;
         var ionicStrength = addedIonicStrength;
         double largest = 0;
         for (var i = 0; i < change.Length; i++)
         {
             ionicStrength += 0.5 * _equilibrium.Charges[i] * _equilibrium.Charges[i] * change[i];
-            largest = _molalities[i] > 0 ? Math.Max(largest, Math.Abs(change[i]) / _molalities[i]) : largest;
+            largest = Math.Max(largest, Math.Abs(change[i]) / Math.Max(_molalities[i], traceOfIonicStrength * _ionicStrength));
         }
 
         largest = Math.Max(largest, Math.Abs(ionicStrength) / _ionicStrength);
@@ -201,7 +202,7 @@ internal sealed class Sensitivity
         var molalities = new double[change.Length];
         for (var i = 0; i < molalities.Length; i++)
         {
-            molalities[i] = _molalities[i] + (step * change[i]);
+            molalities[i] = Math.Max(0, _molalities[i] + (step * change[i]));
         }
 
         var log10Gammas = new double[change.Length];

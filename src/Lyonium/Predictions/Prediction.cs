@@ -13,12 +13,14 @@ namespace Lyonium.Predictions;
 public sealed class Prediction
 {
     private readonly SolvedMixture _answer;
+    private readonly Lazy<BufferFigures?> _buffer;
 
-    internal Prediction(SolvedMixture answer, string method, string activityModel)
+    internal Prediction(SolvedMixture answer, ISolver method, IActivityModel activityModel)
     {
         _answer = answer;
-        Method = method;
-        ActivityModel = activityModel;
+        _buffer = new Lazy<BufferFigures?>(() => BufferFiguresOf.Find(answer, method, activityModel));
+        Method = method.Name;
+        ActivityModel = activityModel.Name;
     }
 
     /// <summary>What was mixed.</summary>
@@ -62,6 +64,12 @@ public sealed class Prediction
 
     /// <summary>The ionic strength.</summary>
     public Molality IonicStrength => Molality.FromMolesPerKilogram(IonicStrengthMolPerKg);
+
+    /// <summary>
+    /// Buffer capacity, dilution value and temperature coefficient; <see langword="null"/> where the equilibrium has no exact answer. Found
+    /// when they are first asked for.
+    /// </summary>
+    public BufferFigures? Buffer => _buffer.Value;
 
     /// <summary>Every species: the two ions of water, then family by family from the least protonated form on.</summary>
     public required IReadOnlyList<PredictedSpecies> Species { get; init; }

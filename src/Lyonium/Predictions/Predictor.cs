@@ -146,7 +146,7 @@ public sealed class Predictor
     {
         var mixture = answer.Modelled.Mixture;
         var species = answer.Species();
-        return new Prediction(answer, Method.Name, ActivityModel.Name)
+        return new Prediction(answer, Method, ActivityModel)
         {
             PHydrogenConcentration = -Math.Log10(species[Equilibrium.HydrogenIon].ConcentrationMolPerL),
             Species = species,

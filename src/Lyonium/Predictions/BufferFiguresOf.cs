@@ -1,0 +1,106 @@
+using System;
+using System.Linq;
+using Lyonium.Equilibria;
+using Lyonium.Modelling;
+using Lyonium.Solvers;
+using Lyonium.Water;
+
+namespace Lyonium.Predictions;
+
+/// <summary>Finds the buffer figures of an answer: derivatives at its equilibrium, and a second answer for the diluted mixture.</summary>
+internal sealed class BufferFiguresOf
+{
+    private const double LowestK = 273.15;
+    private const double HighestK = 373.15;
+    private const double StepK = 0.01;
+
+    private readonly SolvedMixture _answer;
+    private readonly IActivityModel _model;
+    private readonly Sensitivity _sensitivity;
+
+    private BufferFiguresOf(SolvedMixture answer, IActivityModel model)
+    {
+        _answer = answer;
+        _model = model;
+        _sensitivity = new Sensitivity(answer.Modelled.Equilibrium, model, answer.Speciation);
+    }
+
+    /// <summary>The figures; <see langword="null"/> where the equilibrium has no exact answer, or its coefficients give no derivative.</summary>
+    public static BufferFigures? Find(SolvedMixture answer, ISolver method, IActivityModel model)
+    {
+        var exact = method is ExactSolver ? answer : ExactAnswer(answer, model);
+        try
+        {
+            return exact is null ? null : new BufferFiguresOf(exact, model).Find();
+        }
+        catch (Exception e) when (e is not OutOfMemoryException)
+        {
+            // The model is other people's code: where it fails beside the answer, there is no figure.
+            return null;
+        }
+    }
+
+    private static SolvedMixture? ExactAnswer(SolvedMixture answer, IActivityModel model)
+    {
+        var attempt = SolvedMixture.TrySolve(answer.Modelled.Mixture, new ExactSolver(), model);
+        return attempt.Success ? attempt.Value : null;
+    }
+
+    private BufferFigures? Find()
+    {
+        var mixture = _answer.Modelled.Mixture;
+        var capacity = mixture.WaterKg / mixture.VolumeL / _sensitivity.PHPer(Change.StrongBase);
+        var temperatureCoefficient = TemperatureCoefficient();
+        return double.IsNaN(capacity) || double.IsInfinity(capacity) || double.IsNaN(temperatureCoefficient)
+            ? null
+            : new BufferFigures
+            {
+                CapacityMolPerL = capacity,
+                DilutionValue = DilutionValue(),
+                TemperatureCoefficientPerK = temperatureCoefficient,
+                TemperatureCoefficientLeavesOut = _answer.Modelled.Families.SelectMany(family => family.Steps)
+                    .Where(step => !step.ChangesWithTemperature).Select(step => step.Id).ToArray(),
+            };
+    }
+
+    private double DilutionValue()
+    {
+        var mixture = _answer.Modelled.Mixture;
+        var equalVolumeKg = mixture.VolumeL * WaterDensity.KgPerL(mixture.Recipe.PreparedAtK);
+        var diluted = SolvedMixture.TrySolve(mixture.WithWaterKg(mixture.WaterKg + equalVolumeKg), new ExactSolver(), _model);
+        return diluted.Success ? diluted.Value.Outcome.PH - _answer.Outcome.PH : double.NaN;
+    }
+
+    // The constants, and the coefficients at the ionic strength of the answer, are compared a hundredth of a kelvin to either side.
+    private double TemperatureCoefficient()
+    {
+        var temperatureK = _answer.Modelled.Equilibrium.Solvent.TemperatureK;
+        var lowK = Math.Max(LowestK, temperatureK - StepK);
+        var highK = Math.Min(HighestK, temperatureK + StepK);
+        var low = At(lowK);
+        var high = At(highK);
+        var log10K = new double[low.SpeciesCount];
+        for (var i = 0; i < low.Species.Count; i++)
+        {
+            log10K[i + Equilibrium.WaterIons] = (high.Species[i].Log10K - low.Species[i].Log10K) / (highK - lowK);
+        }
+
+        var log10Gammas = Log10Gammas(high).Zip(Log10Gammas(low), (above, below) => (above - below) / (highK - lowK)).ToArray();
+        return _sensitivity.PHPer(new Change
+        {
+            Log10K = log10K,
+            Log10Gammas = log10Gammas,
+            PKw = (high.Solvent.PKw - low.Solvent.PKw) / (highK - lowK),
+        });
+    }
+
+    private Equilibrium At(double temperatureK) =>
+        new Doorway(_answer.Modelled.Mixture, _model) { TemperatureK = temperatureK }.Run().GetValueOrThrow().Equilibrium;
+
+    private double[] Log10Gammas(Equilibrium equilibrium)
+    {
+        var log10Gammas = new double[equilibrium.SpeciesCount];
+        _model.Log10Gammas(equilibrium, _answer.Speciation.IonicStrengthMolPerKg, _answer.Speciation.MolalitiesMolPerKg.ToArray(), log10Gammas);
+        return log10Gammas;
+    }
+}
