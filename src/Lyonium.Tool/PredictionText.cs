@@ -53,8 +53,33 @@ internal sealed class PredictionText(Prediction prediction)
         Row(brief, "p[H]", prediction.PHydrogenConcentration.ToString("F4", CultureInfo.InvariantCulture) + "  (concentration, mol/L)");
         Row(brief, "ionic strength", NumberFormat.Significant(prediction.IonicStrengthMolPerKg, 4) + " mol/kg");
         Row(brief, "volume", NumberFormat.Volume(prediction.Mixture.VolumeL) + " with " + NumberFormat.Mass(prediction.Mixture.WaterKg) + " of water");
+        if (prediction.Buffer is { } buffer)
+        {
+            Row(brief, "buffer", BufferLine(buffer));
+        }
+
+        Row(brief, "model error", ModelErrorLine());
         Row(brief, "method", prediction.Method + ", activity coefficients " + prediction.ActivityModel);
         console.Write(brief);
+    }
+
+    private static string BufferLine(BufferFigures buffer)
+    {
+        var dilution = double.IsNaN(buffer.DilutionValue) ? "" : ", dilution value " + Signed(buffer.DilutionValue, "F3");
+        var leavesOut = buffer.TemperatureCoefficientLeavesOut.Count == 0 ? "" : " without " + string.Join(", ", buffer.TemperatureCoefficientLeavesOut);
+        return $"capacity {NumberFormat.Significant(buffer.CapacityMolPerL, 3)} mol/L{dilution}, dpH/dT {Signed(buffer.TemperatureCoefficientPerK, "F4")} per K{leavesOut}";
+    }
+
+    private string ModelErrorLine() => prediction.ModelUncertainty is { } error
+        ? string.Create(
+            CultureInfo.InvariantCulture,
+            $"±{error.StandardUncertainty:F3} (standard uncertainty, {error.Checks} published values; a glass electrode's junction comes on top)")
+        : "no published value speaks for this mixture";
+
+    private static string Signed(double value, string format)
+    {
+        var text = value.ToString(format, CultureInfo.InvariantCulture);
+        return text.Trim('-', '0', '.').Length == 0 ? text.TrimStart('-') : value > 0 ? "+" + text : text;
     }
 
     private string Scope() =>

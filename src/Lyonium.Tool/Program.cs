@@ -12,6 +12,7 @@ try
         PredictCommand.Create(),
         CompareCommand.Create(),
         ConstantsCommand.Create(),
+        QualifyCommand.Create(),
     };
     var parsed = root.Parse(args);
     if (parsed.Errors.Count == 0)

@@ -4,6 +4,7 @@ using System.Linq;
 using Lyonium.Activity;
 using Lyonium.Predictions;
 using Lyonium.Recipes;
+using Lyonium.Substances;
 using Xunit;
 using Xunit.Abstractions;
 
@@ -28,7 +29,7 @@ public sealed class Davies1962Tests(ITestOutputHelper output)
     public void Log10Gammas_SodiumChloride_AgreesWithTheEquation(string molality, double bracket)
     {
         var recipe = Recipe.Named("salt").PourWater("1 kg").Add(molality + " mol", "sodium chloride").Build();
-        var prediction = new Predictor().Predict(recipe);
+        var prediction = new Predictor(SubstanceTable.Default, null, new DaviesModel()).Predict(recipe);
         foreach (var ion in prediction.Species.Where(one => one.Charge != 0))
         {
             // Half of the last digit of A and of the bracket, and the ions of water in the ionic strength (1e-7 mol/kg).
@@ -45,7 +46,7 @@ public sealed class Davies1962Tests(ITestOutputHelper output)
     public void Log10Gammas_EveryCharge_GoesWithItsSquare()
     {
         var recipe = Recipe.Named("citrate").PourWater("1 kg").Add("0.01 mol", "trisodium citrate dihydrate").Build();
-        var prediction = new Predictor().Predict(recipe);
+        var prediction = new Predictor(SubstanceTable.Default, null, new DaviesModel()).Predict(recipe);
         var root = Math.Sqrt(prediction.IonicStrengthMolPerKg);
         var bracket = (root / (1 + root)) - (0.3 * root * root);
         foreach (var species in prediction.Species)

@@ -1,6 +1,8 @@
 using System.Globalization;
+using Lyonium.Activity;
 using Lyonium.Predictions;
 using Lyonium.Recipes;
+using Lyonium.Substances;
 using Xunit;
 using Xunit.Abstractions;
 
@@ -26,7 +28,7 @@ public sealed class HandbookApproximatePHTests(ITestOutputHelper output)
             var inputs = string.Create(CultureInfo.InvariantCulture, $"{row.Text("substance")} {row.Text("normality")} N, {molPerL:G4} mol/L");
             var strength = molPerL.ToString("R", CultureInfo.InvariantCulture) + " mol/L";
             var recipe = Recipe.Named("reagent").At("25 Cel").PreparedAt("25 Cel").Pour("1 L", Stock.Of(row.Text("substance"), strength)).Build();
-            var prediction = new Predictor().Predict(recipe);
+            var prediction = new Predictor(SubstanceTable.Default, null, new DaviesModel()).Predict(recipe);
             if (row.Caution.Length > 0 || prediction.IonicStrengthMolPerKg > 0.5)
             {
                 table.Report(row, inputs, row.Number("pH"), prediction.PH);

@@ -16,7 +16,7 @@ public sealed class HitchcockMacInnes1938Tests(ITestOutputHelper output)
     {
         var table = new DeviationTable(
             output,
-            "Hitchcock and Taylor 1937-38, MacInnes, Belcher and Shedlovsky 1938, 25 degC, davies",
+            "Hitchcock and Taylor 1937-38, MacInnes, Belcher and Shedlovsky 1938, 25 degC",
             "0.03: 0.02 as a careful calculation reproduces the standards, and 0.01 by which the scales of the two papers differ from each other and from "
             + "that of today");
         foreach (var row in PublishedRow.ReadAll("hitchcock-macinnes-1938.csv"))
@@ -38,6 +38,6 @@ public sealed class HitchcockMacInnes1938Tests(ITestOutputHelper output)
             }
         }
 
-        table.AssertHolds(8);
+        table.AssertHolds(7);
     }
 }

@@ -1,6 +1,8 @@
 using System.Linq;
+using Lyonium.Activity;
 using Lyonium.Predictions;
 using Lyonium.Recipes;
+using Lyonium.Substances;
 using Xunit;
 using Xunit.Abstractions;
 
@@ -22,7 +24,7 @@ public sealed class ReagentSolutionPHTests(ITestOutputHelper output)
         foreach (var row in PublishedRow.ReadAll("reagent-solution-ph.csv"))
         {
             var recipe = Recipe.Named("reagent").At("25 Cel").PreparedAt("25 Cel").PourWater("100 mL").Weigh("5 g", row.Text("substance")).Build();
-            var prediction = new Predictor().Predict(recipe);
+            var prediction = new Predictor(SubstanceTable.Default, null, new DaviesModel()).Predict(recipe);
             var middle = (row.Number("low") + row.Number("high")) / 2;
             var inputs = $"{row.Text("substance")}, {row.Text("low")} to {row.Text("high")}";
             if (row.Caution.Length == 0 && prediction.Assumptions.Single(one => one.Code == "ionic-strength-in-range").Held)

@@ -26,6 +26,8 @@ internal sealed class JsonPlace
 
     public bool IsObject => _element.ValueKind == JsonValueKind.Object;
 
+    public bool IsNull => _element.ValueKind == JsonValueKind.Null;
+
     public bool IsText => _element.ValueKind == JsonValueKind.String;
 
     /// <summary>The value as it is written.</summary>

@@ -8,7 +8,7 @@ using Lyonium.Substances;
 namespace Lyonium.Predictions;
 
 /// <summary>Gathers what a prediction takes for granted, the method's own assumptions first.</summary>
-internal sealed class AssumptionList(SolvedMixture answer, Predictor predictor, double waterErrorInPH)
+internal sealed class AssumptionList(SolvedMixture answer, Predictor predictor, double waterErrorInPH, double ionSizeErrorInPH)
 {
     private const string CommonPractice = "common practice";
     private const string WholeMixture = "mixture";
@@ -56,6 +56,18 @@ internal sealed class AssumptionList(SolvedMixture answer, Predictor predictor, 
         var highest = predictor.ActivityModel.HighestIonicStrengthMolPerKg;
         yield return new Assumption(
             "ionic-strength-in-range", predictor.ActivityModel.Name, ionicStrength, highest, ionicStrength <= highest, predictor.ActivityModel.Source);
+
+        if (predictor.ActivityModel.UsesIonSizes && answer.UnlistedIonSizes() is { Count: > 0 } unlisted)
+        {
+            const double smallest = 0.005;
+            yield return new Assumption(
+                "ion-size-listed",
+                string.Join(", ", unlisted),
+                ionSizeErrorInPH,
+                smallest,
+                ionSizeErrorInPH <= smallest,
+                "not listed; Güntelberg's 1/B taken, about 3 Å; the figure is what 9 Å would do to the pH");
+        }
 
         const double leastWater = 0.9;
         var water = Mixture.WaterKg / Mixture.MassKg;

@@ -1,6 +1,7 @@
 using System;
 using System.Collections.Generic;
 using System.Globalization;
+using Lyonium.Activity;
 using Lyonium.Equilibria;
 using Lyonium.Quantities;
 using Lyonium.Recipes;
@@ -14,11 +15,13 @@ public sealed class Prediction
 {
     private readonly SolvedMixture _answer;
     private readonly Lazy<BufferFigures?> _buffer;
+    private readonly bool _isOwnModel;
 
     internal Prediction(SolvedMixture answer, ISolver method, IActivityModel activityModel)
     {
         _answer = answer;
         _buffer = new Lazy<BufferFigures?>(() => BufferFiguresOf.Find(answer, method, activityModel));
+        _isOwnModel = ActivityModels.Find(activityModel.Name)?.GetType() != activityModel.GetType();
         Method = method.Name;
         ActivityModel = activityModel.Name;
     }
@@ -70,6 +73,14 @@ public sealed class Prediction
     /// when they are first asked for.
     /// </summary>
     public BufferFigures? Buffer => _buffer.Value;
+
+    /// <summary>
+    /// How far predictions with this activity model lie from published values at about this ionic strength; <see langword="null"/> where no
+    /// published value speaks for it: a host's own model, another temperature than 0 to 50 °C, a higher ionic strength, or a mixture that
+    /// is outside of the model.
+    /// </summary>
+    public ModelUncertainty? ModelUncertainty =>
+        _isOwnModel || OutsideTheModel.Count > 0 ? null : ModelErrorTable.Find(ActivityModel, IonicStrengthMolPerKg, Mixture.TemperatureK);
 
     /// <summary>Every species: the two ions of water, then family by family from the least protonated form on.</summary>
     public required IReadOnlyList<PredictedSpecies> Species { get; init; }

@@ -4,6 +4,7 @@ using System.Linq;
 using Lyonium.Activity;
 using Lyonium.Equilibria;
 using Lyonium.Faults;
+using Lyonium.Modelling;
 using Lyonium.Recipes;
 using Lyonium.Solvers;
 using Lyonium.Substances;
@@ -89,7 +90,7 @@ public sealed class Predictor
         }
 
         var answer = solved.Value;
-        var assumptions = new AssumptionList(answer, this, WaterErrorInPH(mixture, answer)).ToList();
+        var assumptions = new AssumptionList(answer, this, WaterErrorInPH(mixture, answer), IonSizeErrorInPH(mixture, answer)).ToList();
         return new Attempt<Prediction>(Describe(answer, assumptions));
     }
 
@@ -140,6 +141,19 @@ public sealed class Predictor
 
         var shifted = TrySolve(mixture.WithWaterKg(mixture.WaterKg + mixture.EstimatedWaterKg));
         return shifted.Success ? Math.Abs(shifted.Value.Outcome.PH - answer.Outcome.PH) : double.NaN;
+    }
+
+    // What another size of the ions whose size is not listed would do: 9 Å, the largest of Kielland's for an ion of one or two charges.
+    private double IonSizeErrorInPH(Mixture mixture, SolvedMixture answer)
+    {
+        const double largestAngstrom = 9;
+        if (!ActivityModel.UsesIonSizes || answer.UnlistedIonSizes().Count == 0)
+        {
+            return 0;
+        }
+
+        var other = SolvedMixture.TrySolve(new Doorway(mixture, ActivityModel) { SizeOfUnlistedIons = largestAngstrom }, Method, ActivityModel);
+        return other.Success ? Math.Abs(other.Value.Outcome.PH - answer.Outcome.PH) : double.NaN;
     }
 
     private Prediction Describe(SolvedMixture answer, IReadOnlyList<Assumption> assumptions)

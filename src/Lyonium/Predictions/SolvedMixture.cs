@@ -91,6 +91,12 @@ internal sealed class SolvedMixture
         return species;
     }
 
+    /// <summary>The ions of the mixture whose ion-size parameter is not listed, by display.</summary>
+    public IReadOnlyList<string> UnlistedIonSizes() => Modelled.Species
+        .Where((one, i) => one.Charge != 0 && double.IsNaN(Modelled.Equilibrium.IonSizesAngstrom[i]) && Speciation.MolalitiesMolPerKg[i] > 0)
+        .Select(one => one.Display)
+        .ToArray();
+
     // An answer whose coefficients or hydrogen ion overflow cannot be written down, whatever its pH.
     private static bool IsRepresentable(Speciation speciation)
     {

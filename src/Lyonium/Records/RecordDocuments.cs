@@ -37,6 +37,18 @@ internal sealed record EvidenceEntry(
     double Residual,
     double? InputResolution);
 
+internal sealed record BufferEntry(
+    NumberWithUnit Capacity,
+    [property: JsonIgnore(Condition = JsonIgnoreCondition.Never)] double? DilutionValue,
+    NumberWithUnit TemperatureCoefficient,
+    IReadOnlyList<string>? TemperatureCoefficientLeavesOut);
+
+internal sealed record BandEntry(double Low, double High, string Unit);
+
+internal sealed record ModelUncertaintyEntry(double StandardUncertainty, int PublishedValues, BandEntry IonicStrength, string Scope);
+
+internal sealed record UncertaintyEntry(ModelUncertaintyEntry Model);
+
 internal sealed record RecordDocument(
     string Format,
     [property: JsonConverter(typeof(RecipeConverter))] Recipe Recipe,
@@ -49,6 +61,8 @@ internal sealed record RecordDocument(
     NumberWithUnit Volume,
     NumberWithUnit Water,
     NumberWithUnit Temperature,
+    [property: JsonIgnore(Condition = JsonIgnoreCondition.Never)] BufferEntry? Buffer,
+    [property: JsonIgnore(Condition = JsonIgnoreCondition.Never)] UncertaintyEntry? Uncertainty,
     IReadOnlyList<SpeciesEntry> Species,
     IReadOnlyList<AssumptionEntry> Assumptions,
     IReadOnlyList<IterateEntry> Iterates,

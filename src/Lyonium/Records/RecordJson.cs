@@ -8,10 +8,16 @@ using Lyonium.Quantities;
 
 namespace Lyonium.Records;
 
-/// <summary>Predictions as JSON (<c>lyonium-record/1</c>): the recipe, the answer and its evidence.</summary>
+/// <summary>Predictions as JSON (<c>lyonium-record/1.1</c>): the recipe, the answer and its evidence.</summary>
 /// <remarks>Thread-safe.</remarks>
 public static class RecordJson
 {
+    internal const string FormatName = "lyonium-record";
+    internal const string FormatVersion = "1.1";
+
+    /// <summary>The versions that are read, the one that is written last.</summary>
+    internal static readonly string[] Versions = ["1", FormatVersion];
+
     /// <summary>Writes the record of a prediction.</summary>
     /// <param name="prediction">The prediction.</param>
     /// <returns>The text, indented.</returns>
@@ -23,7 +29,7 @@ public static class RecordJson
     }
 
     private static RecordDocument Describe(Prediction prediction) => new(
-        "lyonium-record/1",
+        FormatName + "/" + FormatVersion,
         prediction.Recipe,
         prediction.PH,
         prediction.PHydrogenConcentration,
@@ -34,12 +40,23 @@ public static class RecordJson
         VolumeOf(prediction),
         new NumberWithUnit(prediction.Mixture.WaterKg, "kg"),
         TemperatureOf(prediction),
+        prediction.Buffer is { } buffer ? Describe(buffer) : null,
+        prediction.ModelUncertainty is { } uncertainty ? new UncertaintyEntry(Describe(uncertainty)) : null,
         prediction.Species.Select(Describe).ToArray(),
         prediction.Assumptions.Select(EntryOf.Assumption).ToArray(),
         prediction.Iterates.Select(EntryOf.Iterate).ToArray(),
         prediction.Cautions.Select(Describe).ToArray(),
         Describe(prediction.Evidence),
         prediction.Recipe.Notes);
+
+    private static BufferEntry Describe(BufferFigures one) => new(
+        new NumberWithUnit(one.CapacityMolPerL, "mol/L"),
+        EntryOf.Finite(one.DilutionValue),
+        new NumberWithUnit(one.TemperatureCoefficientPerK, "K-1"),
+        one.TemperatureCoefficientLeavesOut.Count == 0 ? null : one.TemperatureCoefficientLeavesOut);
+
+    private static ModelUncertaintyEntry Describe(ModelUncertainty one) =>
+        new(one.StandardUncertainty, one.Checks, new BandEntry(one.LowMolPerKg, one.HighMolPerKg, "mol/kg"), ModelUncertainty.Scope);
 
     private static string RuleOf(Prediction prediction) =>
         "two decimals"

@@ -16,13 +16,15 @@ internal sealed class RecordReader
         "temperature", "species", "assumptions", "iterates", "cautions", "evidence", "notes",
     ];
 
+    private static readonly string[] KnownLater = [.. Known, "buffer", "uncertainty"];
+
     private readonly JsonPlace _root;
     private readonly JsonPlace? _recipe;
 
-    public RecordReader(JsonPlace root)
+    public RecordReader(JsonPlace root, string version)
     {
         _root = root;
-        var properties = root.Properties(Known);
+        var properties = root.Properties(string.Equals(version, "1", StringComparison.Ordinal) ? Known : KnownLater);
         _recipe = root.Need(properties, "recipe");
         PH = root.Need(properties, "pH")?.Number();
         PHydrogenConcentration = root.Need(properties, "pHydrogenConcentration")?.Number();
@@ -36,6 +38,13 @@ internal sealed class RecordReader
             {
                 Species[id] = molality;
             }
+        }
+
+        if (properties.TryGetValue("buffer", out var buffer) && buffer.IsObject)
+        {
+            BufferCapacity = Number(buffer.Find("capacity"));
+            DilutionValue = buffer.Find("dilutionValue") is { IsNull: false } dilution ? dilution.Number() : null;
+            TemperatureCoefficient = Number(buffer.Find("temperatureCoefficient"));
         }
 
         ReadEvidence(root.Need(properties, "evidence"));
@@ -52,6 +61,12 @@ internal sealed class RecordReader
     public double? IonicStrength { get; }
 
     public double? Water { get; }
+
+    public double? BufferCapacity { get; }
+
+    public double? DilutionValue { get; }
+
+    public double? TemperatureCoefficient { get; }
 
     /// <summary>The molality of each species, in mol/kg, by id.</summary>
     public Dictionary<string, double> Species { get; } = new(StringComparer.Ordinal);

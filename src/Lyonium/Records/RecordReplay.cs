@@ -42,7 +42,7 @@ public sealed class RecordReplay
     }
 
     /// <summary>Replays a record.</summary>
-    /// <param name="json">A <c>lyonium-record/1</c>, at most 64 MiB.</param>
+    /// <param name="json">A <c>lyonium-record/1</c> or <c>lyonium-record/1.1</c>, at most 64 MiB.</param>
     /// <returns>What came of it; or the faults, where the text is no record or its recipe is refused.</returns>
     /// <exception cref="ArgumentNullException"><paramref name="json"/> is <see langword="null"/>.</exception>
     public Attempt<ReplayReport> TryReplay(string json)
@@ -53,12 +53,12 @@ public sealed class RecordReplay
         // The recipe stands one level deeper than where it was read.
         const int deepest = JsonDocumentReader.DeepestNesting + 1;
         var root = JsonDocumentReader.Open(json ?? throw new ArgumentNullException(nameof(json)), mostBytes, faults, deepest);
-        if (root is null || !DocumentFormat.Check(root, "lyonium-record", "1"))
+        if (root is null || DocumentFormat.VersionOf(root, RecordJson.FormatName, RecordJson.Versions) is not { } version)
         {
             return faults.Attempt<ReplayReport>(null);
         }
 
-        var record = new RecordReader(root);
+        var record = new RecordReader(root, version);
         var method = Find(_methods, one => one.Name, record.Method, root.Path + ".method", faults);
         var model = Find(_models, one => one.Name, record.ActivityModel, root.Path + ".activityModel", faults);
         var recipe = record.ReadRecipe(_table);

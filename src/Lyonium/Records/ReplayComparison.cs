@@ -34,6 +34,7 @@ internal sealed class ReplayComparison(RecordReader record, Prediction now)
 
         Check("$.ionicStrength.value", record.IonicStrength, now.IonicStrengthMolPerKg);
         Check("$.water.value", record.Water, now.Mixture.WaterKg);
+        CheckBuffer();
         foreach (var species in now.Species)
         {
             Check($"$.species[{species.Id}]", Recorded(record.Species, species.Id), species.MolalityMolPerKg);
@@ -49,6 +50,27 @@ internal sealed class ReplayComparison(RecordReader record, Prediction now)
         }
 
         return new ReplayReport(isIdentical, isSameBuild, _differences.ToArray(), now);
+    }
+
+    // Where a record has buffer figures; a /1 record has none. They are differences of pH, so as sure as the pH is.
+    private void CheckBuffer()
+    {
+        if (record.BufferCapacity is not double capacity)
+        {
+            return;
+        }
+
+        Check("$.buffer.capacity.value", capacity, now.Buffer?.CapacityMolPerL ?? double.NaN);
+        CheckDifference("$.buffer.dilutionValue", record.DilutionValue, now.Buffer?.DilutionValue ?? double.NaN);
+        CheckDifference("$.buffer.temperatureCoefficient.value", record.TemperatureCoefficient, now.Buffer?.TemperatureCoefficientPerK ?? double.NaN);
+    }
+
+    private void CheckDifference(string path, double? recorded, double replayed)
+    {
+        if (!(Math.Abs(replayed - (recorded ?? double.NaN)) <= 2 * BoundInPH) && !(recorded is null && double.IsNaN(replayed)))
+        {
+            Add(path, recorded, replayed);
+        }
     }
 
     private static double? Recorded(Dictionary<string, double> values, string key) => values.TryGetValue(key, out var value) ? value : null;

@@ -32,6 +32,7 @@ public sealed class RoomsTests
         ["Modelling"] = ["Recipes", "Substances", "Provenance", "Water", "Equilibria", "Activity"],
         ["Predictions"] = ["Modelling", "Solvers", "Documents"],
         ["Records"] = ["Predictions", "Documents"],
+        ["Qualification"] = ["Records", "Predictions"],
         ["Conformance"] = ["Activity", "Solvers"],
     };
 

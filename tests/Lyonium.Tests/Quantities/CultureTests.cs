@@ -54,7 +54,7 @@ public sealed class CultureTests
             refused.Message);
     }
 
-    private static CultureInfo Hostile()
+    internal static CultureInfo Hostile()
     {
         var culture = (CultureInfo)CultureInfo.InvariantCulture.Clone();
         culture.NumberFormat.NumberDecimalSeparator = ",";

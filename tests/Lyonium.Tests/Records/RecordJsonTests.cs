@@ -26,7 +26,7 @@ public sealed class RecordJsonTests
     [Fact]
     public void Write_namesMethodModelAndWhatItRestsOn()
     {
-        Assert.Equal("lyonium-record/1", Record.GetProperty("format").GetString());
+        Assert.Equal("lyonium-record/1.1", Record.GetProperty("format").GetString());
         Assert.Equal("exact", Record.GetProperty("method").GetString());
         Assert.Equal("bates-guggenheim", Record.GetProperty("activityModel").GetString());
         Assert.Equal("two decimals", Record.GetProperty("reported").GetProperty("rule").GetString());

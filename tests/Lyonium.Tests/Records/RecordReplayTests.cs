@@ -1,6 +1,7 @@
 using System;
 using System.IO;
 using System.Linq;
+using System.Text.Json.Nodes;
 using Lyonium.Activity;
 using Lyonium.Predictions;
 using Lyonium.Records;
@@ -43,6 +44,38 @@ public sealed class RecordReplayTests
 
         Assert.Equal([], report.Differences);
         Assert.True(report is { Agrees: true, IsBitIdentical: true, IsSameBuild: true });
+    }
+
+    // What a /1 record lacks: buffer figures and the uncertainty of the model.
+    [Fact]
+    public void TryReplay_record_of_the_first_version_agrees()
+    {
+        var record = FirstVersion(Record("buffer.json", "exact", "bates-guggenheim"));
+        Schemas.FirstRecord.Hold(record);
+
+        Assert.True(Replay.TryReplay(record).Value is { Agrees: true, IsBitIdentical: true });
+        var later = record.Replace("\"method\"", "\"buffer\": null, \"method\"", StringComparison.Ordinal);
+        Assert.Equal(["LYO0205"], Replay.TryReplay(later).Faults.Select(fault => fault.Code));
+    }
+
+    [Theory]
+    [InlineData("capacity")]
+    [InlineData("temperatureCoefficient")]
+    public void TryReplay_changed_buffer_figure_is_told(string figure)
+    {
+        var record = JsonNode.Parse(Record("buffer.json", "exact", "bates-guggenheim"))!;
+        record["buffer"]![figure]!["value"] = 0.5;
+
+        Assert.Equal([$"$.buffer.{figure}.value"], Replay.TryReplay(record.ToJsonString()).Value.Differences.Select(one => one.Path));
+    }
+
+    private static string FirstVersion(string record)
+    {
+        var node = JsonNode.Parse(record)!.AsObject();
+        node["format"] = "lyonium-record/1";
+        node.Remove("buffer");
+        node.Remove("uncertainty");
+        return node.ToJsonString();
     }
 
     [Fact]
@@ -88,7 +121,7 @@ public sealed class RecordReplayTests
     [Theory]
     [InlineData("{ }", "LYO0207")]
     [InlineData("[]", "LYO0208")]
-    [InlineData("{ \"format\": \"lyonium-record/1.1\" }", "LYO0204")]
+    [InlineData("{ \"format\": \"lyonium-record/1.2\" }", "LYO0204")]
     [InlineData("{ \"format\": \"lyonium-recipe/1\" }", "LYO0203")]
     [InlineData("{ \"format\": \"lyonium-record/1\" }", "LYO0207")]
     [InlineData("{ \"format\": \"lyonium-record/1\", \"colour\": 1 }", "LYO0205")]

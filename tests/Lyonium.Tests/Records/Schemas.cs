@@ -15,13 +15,19 @@ internal static class Schemas
 
     public static JsonSchema Recipe { get; } = Load("lyonium-recipe-1");
 
-    public static JsonSchema Record { get; } = Load("lyonium-record-1");
+    public static JsonSchema Record { get; } = Load("lyonium-record-1.1");
+
+    public static JsonSchema FirstRecord { get; } = Load("lyonium-record-1");
 
     public static JsonSchema Faults { get; } = Load("lyonium-faults-1");
 
     public static JsonSchema Table { get; } = Load("lyonium-table-1");
 
     public static JsonSchema Comparison { get; } = Load("lyonium-comparison-1");
+
+    public static JsonSchema Qualification { get; } = Load("lyonium-qualification-1");
+
+    public static JsonSchema Checks { get; } = Load("lyonium-checks-1");
 
     public static JsonSchema Cautions { get; } = Load("lyonium-cautions-1");
 

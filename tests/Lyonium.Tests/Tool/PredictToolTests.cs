@@ -33,7 +33,7 @@ public sealed class PredictToolTests : IDisposable
 
         Assert.Equal((0, ""), (run.ExitStatus, run.Errors));
         using var record = JsonDocument.Parse(run.Output);
-        Assert.Equal("lyonium-record/1", record.RootElement.GetProperty("format").GetString());
+        Assert.Equal("lyonium-record/1.1", record.RootElement.GetProperty("format").GetString());
         Assert.Equal(new Predictor().Predict(RecipeJson.Read(RecipeText.OfTheContract)).PH, record.RootElement.GetProperty("pH").GetDouble());
         Schemas.Record.Hold(run.Output);
     }
