@@ -51,6 +51,11 @@ internal sealed class ConstantsText(SubstanceTable table, IAnsiConsole console)
                 $"{points.Count} points from {NumberFormat.Short(first.MassFraction * 100)} to {NumberFormat.Short(last.MassFraction * 100)} %: {Source(first.DensityKgPerL)}");
         }
 
+        foreach (var spectator in substance.Brings.Select(brought => brought.Family).Where(family => family.IsSpectator))
+        {
+            AddIonSizes(grid, spectator);
+        }
+
         console.Write(grid);
         foreach (var one in substance.Brings.Select(brought => brought.Family).Where(family => !family.IsSpectator))
         {
@@ -70,6 +75,12 @@ internal sealed class ConstantsText(SubstanceTable table, IAnsiConsole console)
             AddValue(grid, "  pKa", step.PKa, "");
             AddValue(grid, "  enthalpy", step.EnthalpyKJPerMol, "kJ/mol");
             AddValue(grid, "  heat capacity", step.HeatCapacityJPerMolK, "J/(mol K)");
+            if (step.Equation is { } equation)
+            {
+                Row(grid, "  equation", $"{CourseText.Equation(equation)}: {equation.Source.Citation} ({equation.KnownAs}){Note(equation.Note)}");
+            }
+
+            Row(grid, "  carried", CourseText.Range(step));
             foreach (var other in step.Alternatives)
             {
                 AddValue(grid, "  also published", other, "");
@@ -90,6 +101,8 @@ internal sealed class ConstantsText(SubstanceTable table, IAnsiConsole console)
         {
             Row(grid, "form", family.Base.Display + ", takes no part in proton exchange");
         }
+
+        AddIonSizes(grid, family);
 
         if (family.Note.Length > 0)
         {
@@ -117,6 +130,14 @@ internal sealed class ConstantsText(SubstanceTable table, IAnsiConsole console)
         return string.Join(" + ", parts) + protons;
     }
 
+    private static void AddIonSizes(Grid grid, Family family)
+    {
+        for (var form = 0; form < family.IonSizesAngstrom.Count; form++)
+        {
+            AddValue(grid, "ion size of " + family.Forms[form].Display, family.IonSizesAngstrom[form], "Å");
+        }
+    }
+
     private static void AddValue(Grid grid, string name, SourcedValue? value, string unit)
     {
         if (value is null)
@@ -126,9 +147,10 @@ internal sealed class ConstantsText(SubstanceTable table, IAnsiConsole console)
 
         var uncertainty = value.StandardUncertainty is double u ? " ± " + NumberFormat.Short(u) : "";
         var conditions = value.Conditions is { } at ? " at " + at : "";
-        var note = value.Note.Length == 0 ? "" : "; " + value.Note;
-        Row(grid, name, $"{NumberFormat.Short(value.Value)}{uncertainty}{(unit.Length == 0 ? "" : " " + unit)}{conditions}: {Source(value)}{note}");
+        Row(grid, name, $"{NumberFormat.Short(value.Value)}{uncertainty}{(unit.Length == 0 ? "" : " " + unit)}{conditions}: {Source(value)}{Note(value.Note)}");
     }
+
+    private static string Note(string note) => note.Length == 0 ? "" : "; " + note;
 
     private static string Source(SourcedValue value) => $"{value.Source.Citation} ({value.KnownAs})";
 }

@@ -8,7 +8,7 @@ namespace Lyonium.Tool;
 /// <summary>The option that lays a user's own table over the library's.</summary>
 internal static class TableOption
 {
-    public static Option<string?> Create() => new("--table") { Description = "a table of your own (lyonium-table/1), laid over the library's" };
+    public static Option<string?> Create() => new("--table") { Description = "a table of your own (lyonium-table/1.1), laid over the library's" };
 
     public static Attempt<SubstanceTable> Open(string? file) => file is null
         ? new Attempt<SubstanceTable>(SubstanceTable.Default)

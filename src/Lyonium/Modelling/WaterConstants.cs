@@ -18,10 +18,10 @@ internal static class WaterConstants
     public const string IonSizeQuantity = "ion-size parameter in Å";
 
     /// <summary>The ion-size parameter of the hydrogen ion, in ångström.</summary>
-    public static SourcedValue HydrogenIonSize { get; } = new(9, Kielland, Known.Memory);
+    public static SourcedValue HydrogenIonSize { get; } = new(9, Kielland, Known.ReadAndMemory);
 
     /// <summary>The ion-size parameter of the hydroxide ion, in ångström.</summary>
-    public static SourcedValue HydroxideIonSize { get; } = new(3.5, Kielland, Known.Memory);
+    public static SourcedValue HydroxideIonSize { get; } = new(3.5, Kielland, Known.ReadAndMemory);
 
     public static Solvent SolventAt(double temperatureK)
     {

@@ -25,6 +25,9 @@ public sealed record PKaEquation
     /// <summary>How it reached the table.</summary>
     public required Known Known { get; init; }
 
+    /// <summary><see cref="Known"/> in the words of the table: <c>read</c>, <c>memory</c>, <c>read+memory</c> or <c>derived</c>.</summary>
+    public string KnownAs => KnownText.Of(Known);
+
     /// <summary>What else a reader should know; empty where there is nothing.</summary>
     public string Note { get; init; } = "";
 

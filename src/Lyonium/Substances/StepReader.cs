@@ -101,7 +101,7 @@ internal sealed class StepReader(SourcedValueReader values, string version)
     {
         if (step.HeatCapacityJPerMolK is not null && step.EnthalpyKJPerMol is null)
         {
-            Refuse(place, ".heatCapacity", "", "a heat capacity stands beside an enthalpy");
+            Refuse(place, ".heatCapacity", NumberText.Shortest(step.HeatCapacityJPerMolK.Value), "a heat capacity stands beside an enthalpy");
         }
 
         if (step.Equation is not { } equation)

@@ -64,7 +64,7 @@ public sealed class SubstanceTable
     /// <summary>The substances, in the order of the table.</summary>
     public IReadOnlyList<Substance> Substances { get; }
 
-    /// <summary>Reads a table from JSON (<c>lyonium-table/1</c>); at most 4 MiB.</summary>
+    /// <summary>Reads a table from JSON (<c>lyonium-table/1.1</c> or <c>/1</c>); at most 4 MiB.</summary>
     /// <param name="json">The stream; it is read to its end and left open.</param>
     /// <returns>The table.</returns>
     /// <exception cref="ArgumentNullException"><paramref name="json"/> is <see langword="null"/>.</exception>
@@ -85,7 +85,7 @@ public sealed class SubstanceTable
     /// takes another's place must end in the same base form. Predictions name the layer of each constant.
     /// </remarks>
     /// <param name="name">The name by which records speak of the layer.</param>
-    /// <param name="json">The layer as <c>lyonium-table/1</c>, at most 4 MiB; sections that it does not need may be left out.</param>
+    /// <param name="json">The layer as <c>lyonium-table/1.1</c> or <c>/1</c>, at most 4 MiB; sections that it does not need may be left out.</param>
     /// <returns>The layered table, or every fault.</returns>
     /// <exception cref="ArgumentNullException">A parameter is <see langword="null"/>.</exception>
     public Attempt<SubstanceTable> TryLayer(string name, Stream json) =>

@@ -14,6 +14,28 @@ public sealed class ConstantsPageTests
 {
     private const string Page = "docs/constants.md";
 
+    private const string Carried = """
+
+        ## How a constant is carried with temperature
+
+        The pKa of the table holds at the temperature beside it, at nearly every step 25 °C. To another temperature T it is carried by a difference,
+        so that it is kept where it was published:
+
+        - with a published **equation**, pK = a/T + b + c T + d ln T, by pK(T) − pK(T₀);
+        - otherwise with the **enthalpy ΔH** and, where it is known, the **heat capacity ΔCp** of the dissociation, by the integrated van 't Hoff
+          equation with three terms, ln K(T) = ln K(T₀) − ΔH/R · (1/T − 1/T₀) + ΔCp/R · (T₀/T − 1 + ln(T/T₀)).
+
+        Which of them a step has follows a rule of sources, not of results ([decision 7](decisions/0007-temperature-courses.md)). A constant published at an
+        ionic strength above zero is first carried to infinite dilution, at its own temperature.
+
+        Each course has a **range**: of an equation the published one; 0 to 60 °C of ΔH and ΔCp, 10 to 40 °C of ΔH alone (common practice). A prediction
+        outside it is made, and flagged as `constant-within-its-temperature-range`. A step without a course keeps its pKa; more than 0.5 K away from its
+        temperature that is flagged as `constant-at-its-temperature`. Both the published pKa and the one that was used stand in the evidence.
+
+        How near this comes to published measurements from 0 to 50 °C is checked in `tests/Lyonium.PublishedValues` (`PKaEquationsTests`, `PKaTablesTests`,
+        `ReactionQuantitiesTests`).
+        """;
+
     private static readonly SubstanceTable Table = SubstanceTable.Default;
 
     private static readonly DissociationStep[] Steps = [.. Table.Families.SelectMany(family => family.Steps)];
@@ -54,7 +76,9 @@ public sealed class ConstantsPageTests
         page.Append("the source or a copy of it, recalled from memory with the source named, both, or derived from named inputs. `lyonium constants NAME`\n");
         page.Append("shows one substance with everything that is known of it.\n\n");
         WriteCounts(page);
+        page.Append(Carried.Replace("\r\n", "\n", StringComparison.Ordinal)).Append('\n');
         WriteFamilies(page);
+        WriteIonSizes(page);
         WriteSources(page);
         return page.ToString();
     }
@@ -78,16 +102,19 @@ public sealed class ConstantsPageTests
         Count(page, "pKa published at another ionic strength than 0", Steps.Count(step => step.PKa.IonicStrengthMolPerKg > 0));
         Count(page, "pKa published at another temperature than 25 °C", Steps.Count(step => step.PKa.TemperatureK is double kelvin && Math.Abs(kelvin - 298.15) > 0.01));
         Count(page, "pKa with other published values beside it", Steps.Count(step => step.Alternatives.Count > 0));
-        Count(page, "steps with an enthalpy", Steps.Count(step => step.EnthalpyKJPerMol is not null));
-        Count(page, "steps with a heat capacity", Steps.Count(step => step.HeatCapacityJPerMolK is not null));
+        Count(page, "steps carried with a published equation", Steps.Count(step => step.Equation is not null));
+        Count(page, "steps carried with enthalpy and heat capacity", Steps.Count(step => step.Equation is null && step.HeatCapacityJPerMolK is not null));
+        Count(page, "steps carried with an enthalpy alone", Steps.Count(step => step.Equation is null && step.EnthalpyKJPerMol is not null && step.HeatCapacityJPerMolK is null));
+        Count(page, "steps whose change with temperature is not known", Steps.Count(step => !step.ChangesWithTemperature));
+        Count(page, "forms with an ion size", Table.Families.Sum(family => family.IonSizesAngstrom.Count(size => size is not null)));
         Count(page, "sources", Table.Sources.Count);
     }
 
     private static void WriteFamilies(StringBuilder page)
     {
         page.Append("\n## Families\n\n");
-        page.Append("ΔH and ΔCp mark steps whose enthalpy and heat capacity are known; \"others\" counts other published values of the pKa.\n\n");
-        page.Append("| family | step | pKa | at | source | known | others | ΔH | ΔCp |\n|---|---|---|---|---|---|---|---|---|\n");
+        page.Append("\"Others\" counts other published values of the pKa. ΔH in kJ/mol, ΔCp in J/(mol K), T in K; the range in °C, with the source of the course.\n\n");
+        page.Append("| family | step | pKa | at | source | known | others | with temperature | range | its source | known |\n|---|---|---|---|---|---|---|---|---|---|---|\n");
         foreach (var family in Table.Families.Where(family => !family.IsSpectator))
         {
             foreach (var step in family.Steps)
@@ -104,8 +131,10 @@ public sealed class ConstantsPageTests
                     step.PKa.Source.Key,
                     step.PKa.KnownAs,
                     step.Alternatives.Count == 0 ? "" : step.Alternatives.Count.ToString(CultureInfo.InvariantCulture),
-                    step.EnthalpyKJPerMol is null ? "" : "yes",
-                    step.HeatCapacityJPerMolK is null ? "" : "yes");
+                    Course(step),
+                    step.ValidRange is { } range ? $"{Celsius(range.LowK)} to {Celsius(range.HighK)}" : "",
+                    step.Equation?.Source.Key ?? step.EnthalpyKJPerMol?.Source.Key ?? "",
+                    step.Equation?.KnownAs ?? step.EnthalpyKJPerMol?.KnownAs ?? "");
             }
         }
 
@@ -113,6 +142,34 @@ public sealed class ConstantsPageTests
         page.AppendJoin(", ", Table.Families.Where(family => family.IsSpectator).Select(family => $"{family.Name} {family.Base.Display}"));
         page.Append(".\n");
     }
+
+    private static void WriteIonSizes(StringBuilder page)
+    {
+        page.Append("\n## Ion sizes\n\nThe ion-size parameter of the extended Debye–Hückel equation, in Å, after Kielland (1937), who lists H⁺ with 9 and OH⁻ with 3.5. A form that\nis not listed here has none in the table.\n\n| Å | forms |\n|---|---|\n");
+        var sizes = Table.Families.SelectMany(family => family.Forms.Zip(family.IonSizesAngstrom, (form, size) => (family.Name, form.Display, Size: size?.Value)));
+        foreach (var size in sizes.Where(one => one.Size is not null).GroupBy(one => one.Size!.Value).OrderByDescending(one => one.Key))
+        {
+            Row(page, Number(size.Key), string.Join(", ", size.Select(one => $"{one.Display} ({one.Name})")));
+        }
+    }
+
+    private static string Course(DissociationStep step)
+    {
+        if (step.Equation is not { } equation)
+        {
+            var heatCapacity = step.HeatCapacityJPerMolK is { } capacity ? ", ΔCp " + Signed(capacity.Value) : "";
+            return step.EnthalpyKJPerMol is { } enthalpy ? "ΔH " + Signed(enthalpy.Value) + heatCapacity : "";
+        }
+
+        (double Coefficient, string Times)[] terms = [(equation.OverT, "/T"), (equation.Constant, ""), (equation.TimesT, " T"), (equation.TimesLnT, " ln T")];
+        var parts = terms.Where(term => term.Coefficient != 0)
+            .Select((term, index) => (term.Coefficient < 0 ? "− " : index == 0 ? "" : "+ ") + Number(Math.Abs(term.Coefficient)) + term.Times);
+        return string.Join(" ", parts);
+    }
+
+    private static string Signed(double value) => (value < 0 ? "−" : "") + Number(Math.Abs(value));
+
+    private static string Celsius(double kelvin) => Number(Math.Round(kelvin - 273.15, 2));
 
     private static void WriteSources(StringBuilder page)
     {

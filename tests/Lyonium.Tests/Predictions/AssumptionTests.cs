@@ -105,12 +105,32 @@ public sealed class AssumptionTests
         Assert.Contains(edta, one => one is { Of: "edta:6", Figure: 0.1, Held: true });
     }
 
+    // Of ascorbic acid the table has no course; its pKa holds at 25 Cel.
     [Fact]
     public void ConstantAtAnotherTemperature_isListedAsNotHeld()
     {
-        var prediction = Of("{ \"substance\": \"nitrilotriacetic acid\", \"amount\": \"1 mmol\" }, " + Kilogram);
+        var prediction = Of("{ \"substance\": \"ascorbic acid\", \"amount\": \"1 mmol\" }, " + Kilogram, "\"temperature\": \"30 Cel\"");
 
-        Assert.Contains(prediction.Assumptions, one => one is { Code: "constant-at-its-temperature", Held: false } && one.Figure is > 4.99 and < 5.01);
+        Assert.Contains(prediction.Assumptions, one => one is { Code: "constant-at-its-temperature", Of: "ascorbate:1", Held: false } && one.Figure is > 4.99 and < 5.01);
+    }
+
+    // Published at 20 Cel, with an enthalpy: carried to 25 Cel, and nothing to flag.
+    [Fact]
+    public void ConstantWithACourse_isCarriedAndNotListed() => Assert.DoesNotContain(
+        Of("{ \"substance\": \"nitrilotriacetic acid\", \"amount\": \"1 mmol\" }, " + Kilogram).Assumptions,
+        one => one.Of == "nitrilotriacetate:3" && one.Code.Contains("temperature", StringComparison.Ordinal));
+
+    // The equation of hypochlorite was published from 5 to 35 Cel.
+    [Theory]
+    [InlineData("35 Cel", false)]
+    [InlineData("45 Cel", true)]
+    public void ConstantBeyondItsRange_isListedAsNotHeld(string temperature, bool isListed)
+    {
+        var prediction = Of("{ \"substance\": \"sodium hypochlorite\", \"amount\": \"1 mmol\" }, " + Kilogram, $"\"temperature\": \"{temperature}\"");
+        var listed = prediction.Assumptions.Where(one => one is { Code: "constant-within-its-temperature-range", Of: "hypochlorite:1" }).ToArray();
+
+        Assert.Equal(isListed ? [false] : [], listed.Select(one => one.Held));
+        Assert.All(listed, one => Assert.Equal(10, one.Figure!.Value, 1e-6));
     }
 
     [Fact]

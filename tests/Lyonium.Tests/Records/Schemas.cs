@@ -21,7 +21,11 @@ internal static class Schemas
 
     public static JsonSchema Faults { get; } = Load("lyonium-faults-1");
 
-    public static JsonSchema Table { get; } = Load("lyonium-table-1");
+    /// <summary>The latest version, which the built-in table is of.</summary>
+    public static JsonSchema Table { get; } = Load("lyonium-table-1.1");
+
+    /// <summary>The first version; users' tables of it are still read.</summary>
+    public static JsonSchema FirstTable { get; } = Load("lyonium-table-1");
 
     public static JsonSchema Comparison { get; } = Load("lyonium-comparison-1");
 
