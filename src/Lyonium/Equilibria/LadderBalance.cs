@@ -49,15 +49,11 @@ internal ref struct LadderBalance
         _nextLog10Gammas = buffer.Slice(species, species);
         _molalities = buffer.Slice(2 * species, species);
         _ratios = buffer.Slice(3 * species, rungs);
-        _log10Gammas.Clear();
-        _ladders.Ratio.AsSpan().CopyTo(_ratios);
+        Forget();
         for (var i = 0; i < _ladders.SpectatorSpecies.Length; i++)
         {
             _molalities[_ladders.SpectatorSpecies[i]] = _ladders.SpectatorTotal[i];
         }
-
-        _inverseGammaH = 1;
-        _inverseGammaOH = 1;
     }
 
     /// <summary>The net charge, in mol/kg; it falls with pH.</summary>
@@ -96,6 +92,20 @@ internal ref struct LadderBalance
 
     public static int BufferLength(Equilibrium equilibrium) =>
         (3 * equilibrium.SpeciesCount) + equilibrium.Ladders!.Species.Length;
+
+    /// <summary>
+    /// Starts again from activity coefficients of one, as a balance just made. Far beyond its range a model may have several ionic strengths
+    /// that agree with themselves; from the same start the same one is found.
+    /// </summary>
+    public void Forget()
+    {
+        _log10Gammas.Clear();
+        _ladders.Ratio.AsSpan().CopyTo(_ratios);
+        _inverseGammaH = 1;
+        _inverseGammaOH = 1;
+        _gammasAt = 0;
+        _largestLog10Gamma = 0;
+    }
 
     /// <summary>Evaluates the balance.</summary>
     /// <param name="activity">The hydrogen-ion activity, above 0.</param>

@@ -11,7 +11,7 @@ namespace Lyonium.Equilibria;
 internal sealed class Sensitivity
 {
     private const int MostRounds = 100;
-    private const double Consistent = 1e-11;
+    private const double Consistent = 1e-10;
     private static readonly double Ln10 = Math.Log(10);
 
     private readonly Equilibrium _equilibrium;
@@ -171,7 +171,7 @@ internal sealed class Sensitivity
     // How ln γ follows a change of the molalities.
     private void Follow(double[] change, double addedIonicStrength, double[] lnGammas)
     {
-        const double smallStep = 1e-5;
+        const double smallStep = 1e-4;
         const double traceOfIonicStrength = 1e-3;
         var ionicStrength = addedIonicStrength;
         double largest = 0;

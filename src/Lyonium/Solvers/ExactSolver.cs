@@ -41,7 +41,7 @@ public sealed class ExactSolver : ISolver
         var buffer = ArrayPool<double>.Shared.Rent(LadderBalance.BufferLength(equilibrium));
         try
         {
-            var search = new Search(new LadderBalance(equilibrium, model, buffer));
+            var search = new Search(new LadderBalance(equilibrium, model, buffer), model.HighestIonicStrengthMolPerKg);
             return search.Run();
         }
         finally
@@ -73,12 +73,14 @@ public sealed class ExactSolver : ISolver
 
     private ref struct Search
     {
+        private readonly double _highestIonicStrength;
         private LadderBalance _balance;
         private int _evaluations;
         private bool _settled;
 
-        public Search(LadderBalance balance)
+        public Search(LadderBalance balance, double highestIonicStrength)
         {
+            _highestIonicStrength = highestIonicStrength;
             _balance = balance;
             _settled = true;
         }
@@ -210,6 +212,12 @@ public sealed class ExactSolver : ISolver
         // Zero where rounding could have turned the sign.
         private double CertainChargeAtPH(double pH)
         {
+            // What certifies must not depend on where the search came from.
+            if (_balance.IonicStrength > _highestIonicStrength)
+            {
+                _balance.Forget();
+            }
+
             var charge = ChargeAt(Math.Pow(10, -pH));
             return Math.Abs(charge) > _balance.Noise ? charge : 0;
         }
