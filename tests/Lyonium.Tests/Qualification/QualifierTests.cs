@@ -191,7 +191,16 @@ public sealed class QualifierTests
         {
             Check = new PublishedCheck
             {
-                Id = "a:1", Title = "a", Source = "a", Known = known, Quantity = "pH", Unit = "1", Inputs = [], Expected = 1, Tolerance = tolerance, Reason = "a",
+                Id = "a:1",
+                Title = "a",
+                Source = "a",
+                Known = known,
+                Quantity = "pH",
+                Unit = "1",
+                Inputs = [],
+                Expected = 1,
+                Tolerance = tolerance,
+                Reason = "a",
             },
             Obtained = obtained,
         };
