@@ -27,7 +27,7 @@ public readonly record struct Constraint
             ? new Constraint(ConstraintKind.Total, molPerKg)
             : throw new ArgumentOutOfRangeException(nameof(molPerKg), molPerKg, "A total is finite and zero or more.");
 
-    /// <summary>The component's activity is fixed.</summary>
+    /// <summary>The component's activity is fixed, by a gas or a solid outside of the solution; such a component has no charge.</summary>
     /// <param name="log10Activity">The log10 of its activity, molality scale; finite.</param>
     /// <returns>The constraint.</returns>
     /// <exception cref="ArgumentOutOfRangeException">The value is not finite.</exception>

@@ -30,7 +30,7 @@ public sealed class Equilibrium
     /// <param name="hydrogenIonSizeAngstrom">The ion-size parameter of the hydrogen ion, in ångström.</param>
     /// <param name="hydroxideIonSizeAngstrom">The ion-size parameter of the hydroxide ion, in ångström.</param>
     /// <exception cref="ArgumentException">
-    /// A species names a component that is not there; a component is in no species; or two rungs of one component differ in charge by
+    /// A species names a component that is not there, or its charge is not that of what it is made of; a component is in no species; or two rungs of one component differ in charge by
     /// something else than their protons, have the same protons, or have constants more than 300 decades apart; or pKw is not within ±300.
     /// </exception>
     public Equilibrium(
@@ -53,8 +53,9 @@ public sealed class Equilibrium
         _charges = new[] { 1, -1 }.Concat(Species.Select(one => one.Charge)).ToArray();
         _ionSizes = new[] { hydrogenIonSizeAngstrom, hydroxideIonSizeAngstrom }.Concat(Species.Select(one => one.IonSizeAngstrom)).ToArray();
         CheckComponents();
-        IsLadders = Species.All(one => one.IsRung) && Constraints.All(one => one.Kind == ConstraintKind.Total);
-        Ladders = IsLadders ? new LadderSet(this) : null;
+        Groups = CoupledGroup.Of(this);
+        IsLadders = Groups.Length == 0;
+        Ladders = new LadderSet(this, Groups.SelectMany(group => group.Members).ToArray());
     }
 
     /// <summary>One constraint for each component.</summary>
@@ -78,8 +79,11 @@ public sealed class Equilibrium
     /// <summary>Whether each species is a rung of one component's ladder and each component has a total: the closed form applies.</summary>
     public bool IsLadders { get; }
 
-    /// <summary>The ladders, laid out for speed; <see langword="null"/> where species couple.</summary>
-    internal LadderSet? Ladders { get; }
+    /// <summary>The ladders, laid out for speed; the components that couple are not among them.</summary>
+    internal LadderSet Ladders { get; }
+
+    /// <summary>The components that couple, or hold a fixed activity; empty where all are ladders.</summary>
+    internal CoupledGroup[] Groups { get; }
 
     private void CheckComponents()
     {
@@ -108,6 +112,23 @@ public sealed class Equilibrium
             {
                 throw new ArgumentException(
                     $"The rungs of component {one.Terms[0].Component} differ in charge by something else than their protons.");
+            }
+        }
+
+        for (var i = 0; i < Constraints.Count; i++)
+        {
+            if (Constraints[i].Kind == ConstraintKind.FixedActivity && rung[i] is { } reservoir && reservoir.Charge != reservoir.Protons)
+            {
+                throw new ArgumentException($"Component {i} has a fixed activity and a charge; what is held by a gas or a solid has none.");
+            }
+        }
+
+        foreach (var one in Species.Where(one => !one.IsRung && one.Terms.All(term => rung[term.Component] is not null)))
+        {
+            var made = one.Terms.Sum(term => term.Count * (rung[term.Component]!.Charge - rung[term.Component]!.Protons));
+            if (one.Charge != made + one.Protons)
+            {
+                throw new ArgumentException($"A species of charge {one.Charge} is made of components and protons of charge {made + one.Protons}.");
             }
         }
 

@@ -11,10 +11,11 @@ internal sealed class LadderSet
     // A ratio of constants must be a double; chemistry needs a tenth of this.
     private const int MostDecades = 300;
 
-    public LadderSet(Equilibrium equilibrium)
+    public LadderSet(Equilibrium equilibrium, int[] coupled)
     {
         var rungs = equilibrium.Species
             .Select((species, index) => (Species: species, Index: index))
+            .Where(one => !coupled.Contains(one.Species.Terms[0].Component))
             .GroupBy(one => one.Species.Terms[0].Component)
             .OrderBy(group => group.Key)
             .Select(group => (Component: group.Key, Rungs: group.OrderBy(one => one.Species.Protons).ToArray()))

@@ -30,7 +30,7 @@ internal sealed class Sensitivity
         _model = model;
         _molalities = at.MolalitiesMolPerKg.ToArray();
         _ionicStrength = at.IonicStrengthMolPerKg;
-        var ladders = equilibrium.Ladders ?? throw new NotSupportedException("Coupled species are not differentiated yet.");
+        var ladders = equilibrium.IsLadders ? equilibrium.Ladders : throw new NotSupportedException("Coupled species are not differentiated yet.");
         _fullest = new int[ladders.Total.Length];
         for (var ladder = 0; ladder < _fullest.Length; ladder++)
         {
@@ -140,7 +140,7 @@ internal sealed class Sensitivity
         molalities[Equilibrium.HydrogenIon] = hydrogen;
         molalities[Equilibrium.HydroxideIon] = hydroxide;
         var charge = hydrogen - hydroxide;
-        var ladders = _equilibrium.Ladders!;
+        var ladders = _equilibrium.Ladders;
         for (var ladder = 0; ladder < _fullest.Length; ladder++)
         {
             var total = ladders.Total[ladder];

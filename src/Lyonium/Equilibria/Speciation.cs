@@ -8,7 +8,7 @@ namespace Lyonium.Equilibria;
 /// <remarks>Immutable; safe to share between threads.</remarks>
 public sealed class Speciation
 {
-    private Speciation(double pH, in LadderBalance balance, double chargeMagnitude)
+    private Speciation(double pH, in ChargeBalance balance, double chargeMagnitude)
     {
         PH = pH;
         IonicStrengthMolPerKg = balance.IonicStrength;
@@ -37,11 +37,10 @@ public sealed class Speciation
     public double ChargeMagnitudeMolPerKg { get; }
 
     /// <summary>Speciates an equilibrium at a pH.</summary>
-    /// <param name="equilibrium">The equilibrium, of ladders.</param>
+    /// <param name="equilibrium">The equilibrium.</param>
     /// <param name="model">The model of activity coefficients.</param>
     /// <param name="pH">−log10 of the hydrogen-ion activity; −300 to 300.</param>
     /// <returns>The speciation.</returns>
-    /// <exception cref="NotSupportedException">Species couple, or a component has a fixed activity.</exception>
     /// <exception cref="ArithmeticException">The model's activity coefficients do not settle at this pH.</exception>
     /// <exception cref="ArgumentOutOfRangeException">The pH is not in range.</exception>
     public static Speciation At(Equilibrium equilibrium, IActivityModel model, double pH)
@@ -53,15 +52,10 @@ public sealed class Speciation
             throw new ArgumentOutOfRangeException(nameof(pH), pH, "A pH lies between -300 and 300 here.");
         }
 
-        if (!equilibrium.IsLadders)
-        {
-            throw new NotSupportedException("Coupled species and fixed activities are not solved yet.");
-        }
-
-        var buffer = ArrayPool<double>.Shared.Rent(LadderBalance.BufferLength(equilibrium));
+        var buffer = ArrayPool<double>.Shared.Rent(ChargeBalance.BufferLength(equilibrium));
         try
         {
-            var balance = new LadderBalance(equilibrium, model, buffer);
+            var balance = new ChargeBalance(equilibrium, model, buffer);
             if (!balance.At(Math.Pow(10, -pH)))
             {
                 throw new ArithmeticException($"The activity coefficients of '{model.Name}' do not settle at this pH.");

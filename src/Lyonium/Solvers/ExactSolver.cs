@@ -7,7 +7,8 @@ namespace Lyonium.Solvers;
 /// <summary>The exact method: the zero of the full charge balance, certified by a bracket.</summary>
 /// <remarks>
 /// <para>
-/// At a given hydrogen-ion activity every ladder speciates in closed form and the charges are summed, activity coefficients and ionic
+/// At a given hydrogen-ion activity every ladder speciates in closed form, coupled components by a damped Newton method on a convex problem,
+/// and the charges are summed, activity coefficients and ionic
 /// strength included; the sum falls with pH and the method finds its zero. Each step replaces every dissociation term by that one of its
 /// two asymptotes (a constant plus a term in a, or a constant plus a term in 1/a) which matches its value and slope, and solves the
 /// quadratic equation that is left; where that step leaves the bracket, the bracket's geometric mean is taken.
@@ -33,15 +34,10 @@ public sealed class ExactSolver : ISolver
     {
         _ = equilibrium ?? throw new ArgumentNullException(nameof(equilibrium));
         _ = model ?? throw new ArgumentNullException(nameof(model));
-        if (!equilibrium.IsLadders)
-        {
-            return Refuse(equilibrium);
-        }
-
-        var buffer = ArrayPool<double>.Shared.Rent(LadderBalance.BufferLength(equilibrium));
+        var buffer = ArrayPool<double>.Shared.Rent(ChargeBalance.BufferLength(equilibrium));
         try
         {
-            var search = new Search(new LadderBalance(equilibrium, model, buffer), model.HighestIonicStrengthMolPerKg);
+            var search = new Search(new ChargeBalance(equilibrium, model, buffer), model.HighestIonicStrengthMolPerKg);
             return search.Run();
         }
         finally
@@ -50,35 +46,14 @@ public sealed class ExactSolver : ISolver
         }
     }
 
-    private static SolverOutcome Refuse(Equilibrium equilibrium)
-    {
-        for (var i = 0; i < equilibrium.Species.Count; i++)
-        {
-            if (!equilibrium.Species[i].IsRung)
-            {
-                return SolverOutcome.Without(SolverStatus.CoupledSpecies, $"species {i}");
-            }
-        }
-
-        for (var i = 0; i < equilibrium.Constraints.Count; i++)
-        {
-            if (equilibrium.Constraints[i].Kind == ConstraintKind.FixedActivity)
-            {
-                return SolverOutcome.Without(SolverStatus.FixedActivity, $"component {i}");
-            }
-        }
-
-        throw new InvalidOperationException("An equilibrium without coupled species and fixed activities is one of ladders.");
-    }
-
     private ref struct Search
     {
         private readonly double _highestIonicStrength;
-        private LadderBalance _balance;
+        private ChargeBalance _balance;
         private int _evaluations;
         private bool _settled;
 
-        public Search(LadderBalance balance, double highestIonicStrength)
+        public Search(ChargeBalance balance, double highestIonicStrength)
         {
             _highestIonicStrength = highestIonicStrength;
             _balance = balance;

@@ -56,7 +56,7 @@ internal sealed class ProtonLevels
     /// <returns>The levels; <see langword="null"/> where a step gives off two protons at once or is out of order, so that no levels exist.</returns>
     public static ProtonLevels? Fill(Equilibrium equilibrium, IReadOnlyList<double> log10Gammas)
     {
-        var ladders = equilibrium.Ladders!;
+        var ladders = equilibrium.Ladders;
         var hydrogen = log10Gammas[Equilibrium.HydrogenIon];
         var levels = new List<ProtonLevel>();
         var protons = default(ExactSum);

@@ -138,14 +138,6 @@ public sealed class SpeciationTests
         Assert.Throws<ArgumentOutOfRangeException>(() => Speciation.At(MixtureInput.Of().ToEquilibrium(), Solving.Ideal, pH));
 
     [Fact]
-    public void At_coupled_species_throws()
-    {
-        var coupled = new Equilibrium(
-            [Constraint.Total(1)], [new Species([new Term(0, 2)], 0, 0, 0)], new Solvent(298.15, 14, 0.51, 0.328));
-        Assert.Throws<NotSupportedException>(() => Speciation.At(coupled, Solving.Ideal, 7));
-    }
-
-    [Fact]
     public void At_model_without_a_number_throws() =>
         Assert.Throws<ArithmeticException>(() => Speciation.At(
             MixtureInput.Of(new LadderInput(1, 0, 5)).ToEquilibrium(), new OddModel((_, gammas) => gammas[2] = double.NaN), 7));

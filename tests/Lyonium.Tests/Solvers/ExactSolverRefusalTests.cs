@@ -10,55 +10,6 @@ public sealed class ExactSolverRefusalTests
 {
     private static readonly MixtureInput Acid = MixtureInput.Of(new LadderInput(0.1, 0, 4.75), new LadderInput(0.05, 1));
 
-    [Fact]
-    public void Solve_species_over_two_components_refused_as_coupled()
-    {
-        var equilibrium = new Equilibrium(
-            [Constraint.Total(0.1), Constraint.Total(0.2)],
-            [
-                new Species([new Term(0, 1)], 0, 2, 0),
-                new Species([new Term(1, 1)], 0, -2, 0),
-                new Species([new Term(0, 1), new Term(1, 1)], 0, 0, 2.3),
-            ],
-            new Solvent(298.15, 14, 0.51, 0.328));
-
-        var outcome = Solving.Exact.Solve(equilibrium, Solving.Ideal);
-
-        Assert.False(equilibrium.IsLadders);
-        Assert.Equal(SolverStatus.CoupledSpecies, outcome.Status);
-        Assert.Equal("species 2", outcome.Reason);
-        Assert.True(double.IsNaN(outcome.PH));
-    }
-
-    [Fact]
-    public void Solve_two_units_of_one_component_refused_as_coupled()
-    {
-        var equilibrium = new Equilibrium(
-            [Constraint.Total(0.1)],
-            [new Species([new Term(0, 1)], 0, 0, 0), new Species([new Term(0, 2)], -1, -1, -4)],
-            new Solvent(298.15, 14, 0.51, 0.328));
-
-        Assert.Equal(SolverStatus.CoupledSpecies, Solving.Exact.Solve(equilibrium, Solving.Ideal).Status);
-    }
-
-    [Fact]
-    public void Solve_fixed_activity_refused_with_the_component()
-    {
-        var equilibrium = new Equilibrium(
-            [Constraint.Total(0.1), Constraint.FixedActivity(-3.5)],
-            [
-                new Species([new Term(0, 1)], 0, 1, 0),
-                new Species([new Term(1, 1)], 0, 0, 0),
-                new Species([new Term(1, 1)], -1, -1, -6.35),
-            ],
-            new Solvent(298.15, 14, 0.51, 0.328));
-
-        var outcome = Solving.Exact.Solve(equilibrium, Solving.Ideal);
-
-        Assert.Equal(SolverStatus.FixedActivity, outcome.Status);
-        Assert.Equal("component 1", outcome.Reason);
-    }
-
     [Theory]
     [InlineData(double.NaN, 0)]
     [InlineData(double.NaN, 1)]
