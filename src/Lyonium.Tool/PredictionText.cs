@@ -67,7 +67,8 @@ internal sealed class PredictionText(Prediction prediction)
     {
         var dilution = double.IsNaN(buffer.DilutionValue) ? "" : ", dilution value " + Signed(buffer.DilutionValue, "F3");
         var leavesOut = buffer.TemperatureCoefficientLeavesOut.Count == 0 ? "" : " without " + string.Join(", ", buffer.TemperatureCoefficientLeavesOut);
-        return $"capacity {NumberFormat.Significant(buffer.CapacityMolPerL, 3)} mol/L{dilution}, dpH/dT {Signed(buffer.TemperatureCoefficientPerK, "F4")} per K{leavesOut}";
+        var coefficient = double.IsNaN(buffer.TemperatureCoefficientPerK) ? "not known" : Signed(buffer.TemperatureCoefficientPerK, "F4") + " per K";
+        return $"capacity {NumberFormat.Significant(buffer.CapacityMolPerL, 3)} mol/L{dilution}, dpH/dT {coefficient}{leavesOut}";
     }
 
     private string ModelErrorLine() => prediction.ModelUncertainty is { } error

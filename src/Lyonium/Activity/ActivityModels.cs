@@ -12,6 +12,7 @@ public static class ActivityModels
     public static IReadOnlyList<IActivityModel> All { get; } = Array.AsReadOnly<IActivityModel>(
     [
         new BatesGuggenheimModel(),
+        new SpecificIonModel(),
         new DaviesModel(),
         new DebyeHuckelExtendedModel(),
         new GuntelbergModel(),

@@ -18,7 +18,7 @@ public sealed class BatesGuggenheimModel : IActivityModel
     public double HighestIonicStrengthMolPerKg => 0.1;
 
     /// <inheritdoc/>
-    public bool UsesIonSizes => false;
+    public IonData Uses => IonData.None;
 
     /// <inheritdoc/>
     public string Source => "R. G. Bates and E. A. Guggenheim, Pure Appl. Chem. 1 (1960) 163; IUPAC Recommendations 2002 (Buck et al.), Pure Appl. Chem. 74 (2002) 2169";

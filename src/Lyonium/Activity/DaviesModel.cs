@@ -17,7 +17,7 @@ public sealed class DaviesModel : IActivityModel
     public double HighestIonicStrengthMolPerKg => 0.5;
 
     /// <inheritdoc/>
-    public bool UsesIonSizes => false;
+    public IonData Uses => IonData.None;
 
     /// <inheritdoc/>
     public string Source => "C. W. Davies, Ion Association, Butterworths, London (1962)";

@@ -18,7 +18,7 @@ public sealed class DebyeHuckelExtendedModel : IActivityModel
     public double HighestIonicStrengthMolPerKg => 0.1;
 
     /// <inheritdoc/>
-    public bool UsesIonSizes => true;
+    public IonData Uses => IonData.Sizes;
 
     /// <inheritdoc/>
     public string Source => "P. Debye and E. Hückel, Phys. Z. 24 (1923) 185; ion sizes and range: J. Kielland, J. Am. Chem. Soc. 59 (1937) 1675";

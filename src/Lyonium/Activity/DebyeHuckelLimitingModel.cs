@@ -17,7 +17,7 @@ public sealed class DebyeHuckelLimitingModel : IActivityModel
     public double HighestIonicStrengthMolPerKg => 0.01;
 
     /// <inheritdoc/>
-    public bool UsesIonSizes => false;
+    public IonData Uses => IonData.None;
 
     /// <inheritdoc/>
     public string Source => "P. Debye and E. Hückel, Phys. Z. 24 (1923) 185; the limit of 0.01 mol/kg is common practice";

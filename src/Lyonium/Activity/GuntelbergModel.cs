@@ -17,7 +17,7 @@ public sealed class GuntelbergModel : IActivityModel
     public double HighestIonicStrengthMolPerKg => 0.1;
 
     /// <inheritdoc/>
-    public bool UsesIonSizes => false;
+    public IonData Uses => IonData.None;
 
     /// <inheritdoc/>
     public string Source => "E. Güntelberg, Z. phys. Chem. 123 (1926) 199; the limit of 0.1 mol/kg is common practice";

@@ -14,7 +14,7 @@ public sealed class IdealModel : IActivityModel
     public double HighestIonicStrengthMolPerKg => 0.001;
 
     /// <inheritdoc/>
-    public bool UsesIonSizes => false;
+    public IonData Uses => IonData.None;
 
     /// <inheritdoc/>
     public string Source => "limiting behaviour at infinite dilution; the limit of 0.001 mol/kg is common practice";

@@ -120,6 +120,17 @@ internal sealed class JsonPlace
         return null;
     }
 
+    public bool? Flag()
+    {
+        if (_element.ValueKind is JsonValueKind.True or JsonValueKind.False)
+        {
+            return _element.ValueKind == JsonValueKind.True;
+        }
+
+        _faults.Add(FaultKinds.WrongType, Path, "", ("expected", "true or false"), ("actual", "something else"));
+        return null;
+    }
+
     public int? WholeNumber()
     {
         if (Number() is not double value)

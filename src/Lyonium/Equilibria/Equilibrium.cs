@@ -22,6 +22,7 @@ public sealed class Equilibrium
 
     private readonly int[] _charges;
     private readonly double[] _ionSizes;
+    private readonly IonInteraction[] _interactions;
 
     /// <summary>Makes an equilibrium.</summary>
     /// <param name="constraints">One constraint for each component.</param>
@@ -29,6 +30,7 @@ public sealed class Equilibrium
     /// <param name="solvent">The water.</param>
     /// <param name="hydrogenIonSizeAngstrom">The ion-size parameter of the hydrogen ion, in ångström.</param>
     /// <param name="hydroxideIonSizeAngstrom">The ion-size parameter of the hydroxide ion, in ångström.</param>
+    /// <param name="interactions">The specific interactions that are known; of other pairs of species nothing is.</param>
     /// <exception cref="ArgumentException">
     /// A species names a component that is not there, or its charge is not that of what it is made of; a component is in no species; or two rungs of one component differ in charge by
     /// something else than their protons, have the same protons, or have constants more than 300 decades apart; or pKw is not within ±300.
@@ -38,7 +40,8 @@ public sealed class Equilibrium
         IReadOnlyList<Species> species,
         Solvent solvent,
         double hydrogenIonSizeAngstrom = double.NaN,
-        double hydroxideIonSizeAngstrom = double.NaN)
+        double hydroxideIonSizeAngstrom = double.NaN,
+        IReadOnlyList<IonInteraction>? interactions = null)
     {
         _ = constraints ?? throw new ArgumentNullException(nameof(constraints));
         _ = species ?? throw new ArgumentNullException(nameof(species));
@@ -52,6 +55,12 @@ public sealed class Equilibrium
         Species = Array.AsReadOnly(species.ToArray());
         _charges = new[] { 1, -1 }.Concat(Species.Select(one => one.Charge)).ToArray();
         _ionSizes = new[] { hydrogenIonSizeAngstrom, hydroxideIonSizeAngstrom }.Concat(Species.Select(one => one.IonSizeAngstrom)).ToArray();
+        _interactions = interactions?.ToArray() ?? [];
+        if (_interactions.Any(one => one.First < 0 || one.Second < 0 || one.First >= _charges.Length || one.Second >= _charges.Length))
+        {
+            throw new ArgumentException("An interaction names a species that is not there.", nameof(interactions));
+        }
+
         CheckComponents();
         Groups = CoupledGroup.Of(this);
         IsLadders = Groups.Length == 0;
@@ -75,6 +84,9 @@ public sealed class Equilibrium
 
     /// <summary>The ion-size parameters in ångström, in the order of <see cref="Charges"/>; NaN where one is not known.</summary>
     public ReadOnlySpan<double> IonSizesAngstrom => _ionSizes;
+
+    /// <summary>The specific interactions that are known.</summary>
+    public ReadOnlySpan<IonInteraction> Interactions => _interactions;
 
     /// <summary>Whether each species is a rung of one component's ladder and each component has a total: the closed form applies.</summary>
     public bool IsLadders { get; }

@@ -16,10 +16,9 @@ public interface IActivityModel
     double HighestIonicStrengthMolPerKg { get; }
 
     /// <summary>
-    /// Whether the coefficients depend on the ion-size parameters of the species: a prediction then lists the sizes with their sources, and
-    /// the ions whose size is not known.
+    /// What the model looks up of the ions beside their charges: a prediction then lists it with its sources, and what is not known of it.
     /// </summary>
-    bool UsesIonSizes { get; }
+    IonData Uses { get; }
 
     /// <summary>The published source of the equation, as a citation.</summary>
     string Source { get; }

@@ -72,7 +72,7 @@ internal sealed class Doorway(Mixture mixture, IActivityModel model)
     {
         var constants = families.SelectMany(family => family.Steps.SelectMany(step => steps.Describe(step, family.Layer))).ToList();
         constants.AddRange(WaterConstants.At(TemperatureK, mixture.Recipe.PreparedAtK));
-        if (model.UsesIonSizes)
+        if (model.Uses.HasFlag(IonData.Sizes))
         {
             constants.AddRange(WaterConstants.IonSizes(TemperatureK));
             constants.AddRange(families.SelectMany(IonSizes));

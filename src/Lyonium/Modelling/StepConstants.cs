@@ -10,9 +10,9 @@ namespace Lyonium.Modelling;
 
 /// <summary>The pKa of every step of a mixture, at infinite dilution and at the temperature of the mixture.</summary>
 /// <remarks>
-/// A pKa published at another ionic strength is first carried to infinite dilution at its own temperature, with the activity model of the
-/// prediction: pKa(0) = pKa(I) + log10 γ(more protonated) − log10 γ(less protonated) − log10 γ(H⁺). Then it is carried to the temperature
-/// of the mixture, where the table says how.
+/// A pKa published at another ionic strength is carried to infinite dilution with the activity model of the prediction:
+/// pKa(0) = pKa(I) + log10 γ(more protonated) − log10 γ(less protonated) − log10 γ(H⁺), at its own temperature; at that of the mixture where
+/// the enthalpy was published at that ionic strength too. And it is carried to the temperature of the mixture, where the table says how.
 /// </remarks>
 internal sealed class StepConstants
 {
@@ -28,7 +28,7 @@ internal sealed class StepConstants
         _modelName = model.Name;
         foreach (var step in families.SelectMany(family => family.Steps).Where(step => step.PKa.IonicStrengthMolPerKg > 0))
         {
-            _shiftToInfiniteDilution.Add(step.Id, ShiftToInfiniteDilution(families.First(family => family.Steps.Contains(step)), step, model));
+            _shiftToInfiniteDilution.Add(step.Id, ShiftToInfiniteDilution(families.First(family => family.Steps.Contains(step)), step, model, CarriedAtK(step)));
         }
     }
 
@@ -44,7 +44,7 @@ internal sealed class StepConstants
             yield return new UsedConstant(step.Id, "pKa at infinite dilution", Derived(
                 step,
                 AtInfiniteDilution(step),
-                step.PKa.TemperatureK,
+                CarriedAtK(step),
                 $"carried from {NumberText.Shortest(step.PKa.IonicStrengthMolPerKg)} mol/kg with the activity model {_modelName}"), layer);
         }
 
@@ -65,12 +65,15 @@ internal sealed class StepConstants
         yield return new UsedConstant(step.Id, "pKa at the temperature of the mixture", AtTemperature(step), layer);
     }
 
-    private static double ShiftToInfiniteDilution(Family family, DissociationStep step, IActivityModel model)
+    // An enthalpy published at the ionic strength of the constant carries it there, so the coefficients are those of the mixture's temperature.
+    private double CarriedAtK(DissociationStep step) => step.EnthalpyKJPerMol is { IonicStrengthMolPerKg: > 0 } ? _temperatureK : step.PublishedAtK;
+
+    private static double ShiftToInfiniteDilution(Family family, DissociationStep step, IActivityModel model, double temperatureK)
     {
         var alone = new Equilibrium(
             [Constraint.Total(0)],
             FamilySpecies.Of(family, 0, one => one.PKa.Value, double.NaN).ToArray(),
-            WaterConstants.SolventAt(step.PublishedAtK),
+            WaterConstants.SolventAt(temperatureK),
             WaterConstants.HydrogenIonSize.Value,
             WaterConstants.HydroxideIonSize.Value);
         var log10Gammas = new double[alone.SpeciesCount];

@@ -1,6 +1,7 @@
 using System;
 using System.Collections.Generic;
 using System.Linq;
+using Lyonium.Equilibria;
 using Lyonium.Quantities;
 using Lyonium.Recipes;
 using Lyonium.Substances;
@@ -53,11 +54,14 @@ internal sealed class AssumptionList(SolvedMixture answer, Predictor predictor, 
     private IEnumerable<Assumption> OfTheModel()
     {
         var ionicStrength = answer.Speciation.IonicStrengthMolPerKg;
+
+        // Ranges are stated to one figure: the standard of 0.1 mol/kg is within 0.1.
+        const double rangeIsStatedTo = 1.005;
         var highest = predictor.ActivityModel.HighestIonicStrengthMolPerKg;
         yield return new Assumption(
-            "ionic-strength-in-range", predictor.ActivityModel.Name, ionicStrength, highest, ionicStrength <= highest, predictor.ActivityModel.Source);
+            ModelScope.IonicStrengthInRange, predictor.ActivityModel.Name, ionicStrength, highest, ionicStrength <= highest * rangeIsStatedTo, predictor.ActivityModel.Source);
 
-        if (predictor.ActivityModel.UsesIonSizes && answer.UnlistedIonSizes() is { Count: > 0 } unlisted)
+        if (predictor.ActivityModel.Uses.HasFlag(IonData.Sizes) && answer.UnlistedIonSizes() is { Count: > 0 } unlisted)
         {
             const double smallest = 0.005;
             yield return new Assumption(
@@ -81,7 +85,7 @@ internal sealed class AssumptionList(SolvedMixture answer, Predictor predictor, 
             if (one.Value.IonicStrengthMolPerKg > 0)
             {
                 yield return new Assumption(
-                    "constant-carried-to-infinite-dilution",
+                    ModelScope.ConstantCarriedToInfiniteDilution,
                     one.Id,
                     one.Value.IonicStrengthMolPerKg,
                     predictor.ActivityModel.HighestIonicStrengthMolPerKg,
@@ -113,13 +117,13 @@ internal sealed class AssumptionList(SolvedMixture answer, Predictor predictor, 
         if (!step.ChangesWithTemperature)
         {
             return new Assumption(
-                "constant-at-its-temperature", step.Id, away, nearK, Held: false, "published at another temperature, and used as it is");
+                ModelScope.ConstantAtItsTemperature, step.Id, away, nearK, Held: false, "published at another temperature, and used as it is");
         }
 
         var beyond = step.ValidRange?.Beyond(Mixture.TemperatureK) ?? 0;
         return beyond > 0
             ? new Assumption(
-                "constant-within-its-temperature-range", step.Id, beyond, 0, Held: false, $"carried beyond {RangeText(step.ValidRange!)}: an extrapolation")
+                ModelScope.ConstantWithinItsTemperatureRange, step.Id, beyond, 0, Held: false, $"carried beyond {RangeText(step.ValidRange!)}: an extrapolation")
             : null;
     }
 

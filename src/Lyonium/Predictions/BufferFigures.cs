@@ -27,7 +27,8 @@ public sealed record BufferFigures
 
     /// <summary>
     /// The temperature coefficient dpH/dT in 1/K, molalities held; without what the constants in
-    /// <see cref="TemperatureCoefficientLeavesOut"/> would add.
+    /// <see cref="TemperatureCoefficientLeavesOut"/> would add, and <see cref="double.NaN"/> where one of them bears on the pH: more than a
+    /// thousandth of its family stands on either side of the step.
     /// </summary>
     public required double TemperatureCoefficientPerK { get; init; }
 

@@ -1,8 +1,10 @@
 using System;
+using System.Collections.Generic;
 using System.Linq;
 using Lyonium.Equilibria;
 using Lyonium.Modelling;
 using Lyonium.Solvers;
+using Lyonium.Substances;
 using Lyonium.Water;
 
 namespace Lyonium.Predictions;
@@ -50,17 +52,28 @@ internal sealed class BufferFiguresOf
     {
         var mixture = _answer.Modelled.Mixture;
         var capacity = mixture.WaterKg / mixture.VolumeL / _sensitivity.PHPer(Change.StrongBase);
-        var temperatureCoefficient = TemperatureCoefficient();
-        return double.IsNaN(capacity) || double.IsInfinity(capacity) || double.IsNaN(temperatureCoefficient)
+        return double.IsNaN(capacity) || double.IsInfinity(capacity)
             ? null
             : new BufferFigures
             {
                 CapacityMolPerL = capacity,
                 DilutionValue = DilutionValue(),
-                TemperatureCoefficientPerK = temperatureCoefficient,
-                TemperatureCoefficientLeavesOut = _answer.Modelled.Families.SelectMany(family => family.Steps)
-                    .Where(step => !step.ChangesWithTemperature).Select(step => step.Id).ToArray(),
+                TemperatureCoefficientPerK = StepsWithoutACourse().Any(BearsOnThePH) ? double.NaN : TemperatureCoefficient(),
+                TemperatureCoefficientLeavesOut = StepsWithoutACourse().Select(step => step.Id).ToArray(),
             };
+    }
+
+    private IEnumerable<DissociationStep> StepsWithoutACourse() =>
+        _answer.Modelled.Families.SelectMany(family => family.Steps).Where(step => !step.ChangesWithTemperature);
+
+    private bool BearsOnThePH(DissociationStep step)
+    {
+        const double smallestShare = 1e-3;
+        var family = _answer.Modelled.Families.First(one => one.Steps.Contains(step));
+        var species = _answer.Species();
+        var less = family.Steps.Count - step.Number;
+        return species.Where(one => one.Id == Doorway.SpeciesId(family, less) || one.Id == Doorway.SpeciesId(family, less + 1))
+            .All(one => one.Fraction > smallestShare);
     }
 
     private double DilutionValue()

@@ -12,11 +12,22 @@ internal static class ModelScope
 {
     public const string WithinListedSolubility = "within-listed-solubility";
     public const string NoReactionButProtonExchange = "no-reaction-but-proton-exchange";
+    public const string IonicStrengthInRange = "ionic-strength-in-range";
+    public const string ConstantCarriedToInfiniteDilution = "constant-carried-to-infinite-dilution";
+    public const string ConstantAtItsTemperature = "constant-at-its-temperature";
+    public const string ConstantWithinItsTemperatureRange = "constant-within-its-temperature-range";
     public const string MayNotDissolve = "may not dissolve";
+
+    private static readonly string[] NeededByTheChecks = [IonicStrengthInRange, ConstantAtItsTemperature, ConstantWithinItsTemperatureRange];
 
     /// <summary>Why a number is of the homogeneous model only; empty where it is not.</summary>
     public static IReadOnlyList<string> Reasons(IEnumerable<Assumption> assumptions) =>
         assumptions.Where(one => !one.Held).Select(ReasonOf).OfType<string>().Distinct(StringComparer.Ordinal).ToArray();
+
+    /// <summary>Whether the mixture takes something for granted that no published check has tried.</summary>
+    public static bool IsBeyondWhatWasChecked(IReadOnlyList<Assumption> assumptions) =>
+        Reasons(assumptions).Count > 0
+        || assumptions.Any(one => one.Code == ConstantCarriedToInfiniteDilution || (!one.Held && NeededByTheChecks.Contains(one.Code, StringComparer.Ordinal)));
 
     private static string? ReasonOf(Assumption one) => one.Code switch
     {

@@ -76,11 +76,11 @@ public sealed class Prediction
 
     /// <summary>
     /// How far predictions with this activity model lie from published values at about this ionic strength; <see langword="null"/> where no
-    /// published value speaks for it: a host's own model, another temperature than 0 to 50 °C, a higher ionic strength, or a mixture that
-    /// is outside of the model.
+    /// published value speaks for it: a host's own model, another temperature than 0 to 50 °C, an ionic strength above the model's range, a
+    /// constant that was not published for the mixture's temperature or for infinite dilution, or a mixture that is outside of the model.
     /// </summary>
     public ModelUncertainty? ModelUncertainty =>
-        _isOwnModel || OutsideTheModel.Count > 0 ? null : ModelErrorTable.Find(ActivityModel, IonicStrengthMolPerKg, Mixture.TemperatureK);
+        _isOwnModel || ModelScope.IsBeyondWhatWasChecked(Assumptions) ? null : ModelErrorTable.Find(ActivityModel, IonicStrengthMolPerKg, Mixture.TemperatureK);
 
     /// <summary>Every species: the two ions of water, then family by family from the least protonated form on.</summary>
     public required IReadOnlyList<PredictedSpecies> Species { get; init; }

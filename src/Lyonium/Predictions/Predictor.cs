@@ -147,7 +147,7 @@ public sealed class Predictor
     private double IonSizeErrorInPH(Mixture mixture, SolvedMixture answer)
     {
         const double largestAngstrom = 9;
-        if (!ActivityModel.UsesIonSizes || answer.UnlistedIonSizes().Count == 0)
+        if (!ActivityModel.Uses.HasFlag(IonData.Sizes) || answer.UnlistedIonSizes().Count == 0)
         {
             return 0;
         }

@@ -40,7 +40,7 @@ internal sealed record EvidenceEntry(
 internal sealed record BufferEntry(
     NumberWithUnit Capacity,
     [property: JsonIgnore(Condition = JsonIgnoreCondition.Never)] double? DilutionValue,
-    NumberWithUnit TemperatureCoefficient,
+       [property: JsonIgnore(Condition = JsonIgnoreCondition.Never)] NumberWithUnit? TemperatureCoefficient,
     IReadOnlyList<string>? TemperatureCoefficientLeavesOut);
 
 internal sealed record BandEntry(double Low, double High, string Unit);

@@ -52,7 +52,7 @@ public static class RecordJson
     private static BufferEntry Describe(BufferFigures one) => new(
         new NumberWithUnit(one.CapacityMolPerL, "mol/L"),
         EntryOf.Finite(one.DilutionValue),
-        new NumberWithUnit(one.TemperatureCoefficientPerK, "K-1"),
+        double.IsNaN(one.TemperatureCoefficientPerK) ? null : new NumberWithUnit(one.TemperatureCoefficientPerK, "K-1"),
         one.TemperatureCoefficientLeavesOut.Count == 0 ? null : one.TemperatureCoefficientLeavesOut);
 
     private static ModelUncertaintyEntry Describe(ModelUncertainty one) =>

@@ -44,7 +44,7 @@ internal sealed class RecordReader
         {
             BufferCapacity = Number(buffer.Find("capacity"));
             DilutionValue = buffer.Find("dilutionValue") is { IsNull: false } dilution ? dilution.Number() : null;
-            TemperatureCoefficient = Number(buffer.Find("temperatureCoefficient"));
+            TemperatureCoefficient = buffer.Find("temperatureCoefficient") is { IsObject: true } coefficient ? Number(coefficient) : null;
         }
 
         ReadEvidence(root.Need(properties, "evidence"));

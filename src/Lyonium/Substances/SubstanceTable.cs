@@ -22,13 +22,17 @@ public sealed class SubstanceTable
         IReadOnlyList<Source> sources,
         IReadOnlyList<AtomicWeight> atomicWeights,
         IReadOnlyList<Family> families,
-        IReadOnlyList<Substance> substances)
+        IReadOnlyList<Substance> substances,
+        IReadOnlyList<InteractionCoefficient> interactions,
+        IReadOnlyList<PairSet> pairSets)
     {
         Identity = identity;
         Sources = sources;
         AtomicWeights = atomicWeights;
         Families = families;
         Substances = substances;
+        Interactions = interactions;
+        PairSets = pairSets;
         _familyOrder = families.Select((family, index) => (family.Id, index)).ToDictionary(one => one.Id, one => one.index, StringComparer.Ordinal);
         _byName = new Dictionary<string, Substance>(StringComparer.Ordinal);
         foreach (var substance in substances)
@@ -63,6 +67,12 @@ public sealed class SubstanceTable
 
     /// <summary>The substances, in the order of the table.</summary>
     public IReadOnlyList<Substance> Substances { get; }
+
+    /// <summary>The specific interaction coefficients of pairs of ions.</summary>
+    public IReadOnlyList<InteractionCoefficient> Interactions { get; }
+
+    /// <summary>The sets of ion pairs, dimers and polymers.</summary>
+    public IReadOnlyList<PairSet> PairSets { get; }
 
     /// <summary>Reads a table from JSON (<c>lyonium-table/1.1</c> or <c>/1</c>); at most 4 MiB.</summary>
     /// <param name="json">The stream; it is read to its end and left open.</param>

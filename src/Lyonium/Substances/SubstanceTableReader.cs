@@ -15,6 +15,7 @@ internal static class SubstanceTableReader
     private const string Resource = "Lyonium.Data.table.json";
 
     private static readonly string[] Sections = ["format", "edition", "sources", "elements", "families", "substances"];
+    private static readonly string[] LaterSections = [.. Sections, "interactions", "pairSets"];
 
     public static SubstanceTable ReadEmbedded()
     {
@@ -35,10 +36,13 @@ internal static class SubstanceTableReader
         var weights = ReadElements(root.Need(properties, "elements"), values);
         var families = new FamilyReader(values, version).Read(root.Need(properties, "families"));
         var substances = new SubstanceReader(values, families, weights, new TakenNames()).Read(root.Need(properties, "substances"));
+        var pairs = new PairSetReader(values, families);
+        var interactions = pairs.ReadInteractions(Optional(properties, "interactions"));
+        var sets = pairs.ReadPairSets(Optional(properties, "pairSets"));
         return faults.Any || edition is null
             ? faults.Attempt<SubstanceTable>(null)
             : new Attempt<SubstanceTable>(new SubstanceTable(
-                new TableIdentity(edition, sha256, []), values.Sources, weights, families, substances));
+                new TableIdentity(edition, sha256, []), values.Sources, weights, families, substances, interactions, sets));
     }
 
     /// <summary>Reads a user's own table and lays it over another: what it has replaces what is below, the rest stays.</summary>
@@ -60,6 +64,9 @@ internal static class SubstanceTableReader
         var ownIds = new HashSet<string>(Ids(Optional(properties, "substances")), StringComparer.Ordinal);
         var names = new TakenNames(kept.Where(one => !ownIds.Contains(one.Id)));
         var own = new SubstanceReader(values, families, weights, names).Read(Optional(properties, "substances")).Select(one => one with { Layer = name }).ToArray();
+        var pairs = new PairSetReader(values, families);
+        var ownInteractions = pairs.ReadInteractions(Optional(properties, "interactions")).Select(one => one with { Layer = name }).ToArray();
+        var ownSets = pairs.ReadPairSets(Optional(properties, "pairSets")).Select(one => one with { Layer = name }).ToArray();
         if (faults.Any || edition is null)
         {
             return faults.Attempt<SubstanceTable>(null);
@@ -68,7 +75,14 @@ internal static class SubstanceTableReader
         var layer = new TableLayer(name, edition, sha256);
         var identity = below.Identity with { Layers = [.. below.Identity.Layers, layer] };
         return new Attempt<SubstanceTable>(
-            new SubstanceTable(identity, values.Sources, weights, families, Over(kept, own, one => one.Id)));
+            new SubstanceTable(
+                identity,
+                values.Sources,
+                weights,
+                families,
+                Over(kept, own, one => one.Id),
+                Over(below.Interactions, ownInteractions, one => one.Cation + " " + one.Anion),
+                Over(below.PairSets, ownSets, one => one.Id)));
     }
 
     private static (JsonPlace Root, IReadOnlyDictionary<string, JsonPlace> Properties, string Version, string? Edition, string Sha256)? Open(
@@ -81,7 +95,7 @@ internal static class SubstanceTableReader
             return null;
         }
 
-        var properties = root.Properties(Sections);
+        var properties = root.Properties(string.Equals(version, "1", StringComparison.Ordinal) ? Sections : LaterSections);
         return (root, properties, version, TableText.Read(root, properties, "edition"), Fingerprint.Of(bytes.ToArray()));
     }
 

@@ -9,10 +9,10 @@ public sealed record TemperatureRange(double LowK, double HighK)
     private const double ZeroCelsiusK = 273.15;
 
     /// <summary>
-    /// Of a step with an enthalpy and a heat capacity, where the table gives no range: 0 to 60 °C. What is left out, a change of the heat
-    /// capacity by 3 J/(mol K²), is then at most 0.013 in pKa. Common practice.
+    /// Of a step with an enthalpy and a heat capacity, where the table gives no range: 0 to 50 °C. What is left out, a change of the heat
+    /// capacity by 3 J/(mol K²), is then at most 0.006 in pKa; what the heat capacity itself may be off by comes on top. Common practice.
     /// </summary>
-    internal static TemperatureRange WithHeatCapacity { get; } = OfCelsius(0, 60);
+    internal static TemperatureRange WithHeatCapacity { get; } = OfCelsius(0, 50);
 
     /// <summary>
     /// Of a step with an enthalpy alone, where the table gives no range: 10 to 40 °C. What is left out, a heat capacity of 200 J/(mol K), is

@@ -28,7 +28,7 @@ public sealed class ConstantsPageTests
         Which of them a step has follows a rule of sources, not of results ([decision 7](decisions/0007-temperature-courses.md)). A constant published at an
         ionic strength above zero is first carried to infinite dilution, at its own temperature.
 
-        Each course has a **range**: of an equation the published one; 0 to 60 °C of ΔH and ΔCp, 10 to 40 °C of ΔH alone (common practice). A prediction
+        Each course has a **range**: of an equation the published one; 0 to 50 °C of ΔH and ΔCp, 10 to 40 °C of ΔH alone (common practice). A prediction
         outside it is made, and flagged as `constant-within-its-temperature-range`. A step without a course keeps its pKa; more than 0.5 K away from its
         temperature that is flagged as `constant-at-its-temperature`. Both the published pKa and the one that was used stand in the evidence.
 

@@ -12,7 +12,7 @@ internal sealed class OddModel(OddModel.Rule rule) : IActivityModel
 
     public double HighestIonicStrengthMolPerKg => 1;
 
-    public bool UsesIonSizes => false;
+    public IonData Uses => IonData.None;
 
     public string Source => "a test";
 

@@ -128,7 +128,7 @@ public sealed class SensitivityTests
 
         public double HighestIonicStrengthMolPerKg => 1;
 
-        public bool UsesIonSizes => false;
+        public IonData Uses => IonData.None;
 
         public string Source => "a test";
 

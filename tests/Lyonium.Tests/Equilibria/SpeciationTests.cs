@@ -153,7 +153,7 @@ public sealed class SpeciationTests
 
         public double HighestIonicStrengthMolPerKg => 1;
 
-        public bool UsesIonSizes => false;
+        public IonData Uses => IonData.None;
 
         public string Source => "a test";
 

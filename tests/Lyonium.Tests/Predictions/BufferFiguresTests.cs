@@ -163,7 +163,7 @@ public sealed class BufferFiguresTests
 
         public double HighestIonicStrengthMolPerKg => 1;
 
-        public bool UsesIonSizes => false;
+        public IonData Uses => IonData.None;
 
         public string Source => "a test";
 

@@ -149,7 +149,7 @@ public sealed class PluginFailureTests
 
         public double HighestIonicStrengthMolPerKg => 1;
 
-        public bool UsesIonSizes => false;
+        public IonData Uses => IonData.None;
 
         public string Source => "none";
 
