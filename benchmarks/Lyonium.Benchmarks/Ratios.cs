@@ -17,31 +17,39 @@ internal static class Ratios
         Console.WriteLine($"{"mixture",-18}{"method",-32}{"µs",8}{"ratio",8}{"bytes",8}  pH");
         foreach (var mixture in BenchmarkCase.All)
         {
-            (string Name, Func<double> Solve)[] methods =
-            [
+            Print(
+                mixture.Name,
                 ("exact", mixture.Exact),
                 ("MathNet Brent", mixture.MathNetBrent),
                 ("MathNet RobustNewtonRaphson", mixture.MathNetNewton),
-                ("exact, with Davies", mixture.ExactDavies),
-            ];
-            var times = methods.Select(_ => new double[Rounds]).ToArray();
-            for (var round = -Rounds / 2; round < Rounds; round++)
-            {
-                for (var i = 0; i < methods.Length; i++)
-                {
-                    // The first rounds are for the compiler.
-                    var microseconds = Time(methods[i].Solve);
-                    times[i][Math.Max(round, 0)] = microseconds;
-                }
-            }
+                ("exact, with Davies", mixture.ExactDavies));
+        }
 
-            var medians = times.Select(one => one.Order().ElementAt(Rounds / 2)).ToArray();
+        var pair = new PairCase();
+        foreach (var model in PairCase.Models)
+        {
+            Print("one ion pair", ("ladders, " + model.Name, () => pair.Ladders(model)), ("coupled, " + model.Name, () => pair.Coupled(model)));
+        }
+    }
+
+    private static void Print(string mixture, params (string Name, Func<double> Solve)[] methods)
+    {
+        var times = methods.Select(_ => new double[Rounds]).ToArray();
+        for (var round = -Rounds / 2; round < Rounds; round++)
+        {
             for (var i = 0; i < methods.Length; i++)
             {
-                Console.WriteLine(string.Create(
-                    CultureInfo.InvariantCulture,
-                    $"{mixture.Name,-18}{methods[i].Name,-32}{medians[i],8:F2}{medians[i] / medians[0],8:F1}{Allocated(methods[i].Solve),8}  {methods[i].Solve():F9}"));
+                // The first rounds are for the compiler.
+                times[i][Math.Max(round, 0)] = Time(methods[i].Solve);
             }
+        }
+
+        var medians = times.Select(one => one.Order().ElementAt(Rounds / 2)).ToArray();
+        for (var i = 0; i < methods.Length; i++)
+        {
+            Console.WriteLine(string.Create(
+                CultureInfo.InvariantCulture,
+                $"{mixture,-18}{methods[i].Name,-32}{medians[i],8:F2}{medians[i] / medians[0],8:F1}{Allocated(methods[i].Solve),8}  {methods[i].Solve():F9}"));
         }
     }
 

@@ -15,10 +15,11 @@ internal static class PredictCommand
         var recipe = new Argument<string>("RECIPE") { Description = "a file of lyonium-recipe/1, or - for standard input" };
         var method = Plugins.MethodOption();
         var activity = Plugins.ActivityOption();
+        var pairs = PairsOption.Create();
         var table = TableOption.Create();
         var steps = new Option<bool>("--steps") { Description = "show the worked steps after the answer (text only)" };
         var format = OutputFormat.Option();
-        var command = new Command("predict", "Predicts the pH of a recipe.") { recipe, method, activity, table, steps, format };
+        var command = new Command("predict", "Predicts the pH of a recipe.") { recipe, method, activity, pairs, table, steps, format };
         command.SetAction(parsed =>
         {
             var asJson = OutputFormat.IsJson(parsed.GetValue(format)!);
@@ -30,7 +31,7 @@ internal static class PredictCommand
 
             var predictor = new Predictor(
                 opened.Value, Methods.Find(parsed.GetValue(method)!), ActivityModels.Find(parsed.GetValue(activity)!));
-            return Run(parsed.GetValue(recipe)!, predictor, parsed.GetValue(steps), asJson);
+            return Run(parsed.GetValue(recipe)!, PairsOption.Apply(predictor, parsed.GetValue(pairs)), parsed.GetValue(steps), asJson);
         });
         return command;
     }

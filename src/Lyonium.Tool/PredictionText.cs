@@ -59,7 +59,7 @@ internal sealed class PredictionText(Prediction prediction)
         }
 
         Row(brief, "model error", ModelErrorLine());
-        Row(brief, "method", prediction.Method + ", activity coefficients " + prediction.ActivityModel);
+        Row(brief, "method", prediction.Method + ", activity coefficients " + prediction.ActivityModel + PairsInUse());
         console.Write(brief);
     }
 
@@ -71,10 +71,16 @@ internal sealed class PredictionText(Prediction prediction)
         return $"capacity {NumberFormat.Significant(buffer.CapacityMolPerL, 3)} mol/L{dilution}, dpH/dT {coefficient}{leavesOut}";
     }
 
+    private string PairsInUse()
+    {
+        var formed = prediction.Evidence.Constants.Where(one => one.Quantity == "log10 K").Select(one => one.Id).ToArray();
+        return formed.Length == 0 ? "" : ", with " + string.Join(", ", formed).Replace('-', ' ');
+    }
+
     private string ModelErrorLine() => prediction.ModelUncertainty is { } error
         ? string.Create(
             CultureInfo.InvariantCulture,
-            $"±{error.StandardUncertainty:F3} (standard uncertainty, {error.Checks} published values; a glass electrode's junction comes on top)")
+            $"±{error.StandardUncertainty:F3} (standard uncertainty, from {error.Solutions} published solutions; a glass electrode's junction comes on top)")
         : "no published value speaks for this mixture";
 
     private static string Signed(double value, string format)
@@ -182,7 +188,7 @@ internal sealed class PredictionText(Prediction prediction)
         var evidence = prediction.Evidence;
         Heading(console, "Rests on");
         var grid = new Grid().AddColumn(new GridColumn { Padding = new Padding(2, 0, 2, 0) }).AddColumn();
-        foreach (var one in evidence.Constants.Where(one => one.Quantity.StartsWith('p')))
+        foreach (var one in evidence.Constants.Where(one => one.Quantity.StartsWith('p') || one.Quantity.StartsWith("log10 K", StringComparison.Ordinal)))
         {
             var uncertainty = one.Value.StandardUncertainty is double u ? " ± " + NumberFormat.Short(u) : "";
             Row(

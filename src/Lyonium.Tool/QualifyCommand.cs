@@ -12,11 +12,12 @@ internal static class QualifyCommand
     public static Command Create()
     {
         var activity = Plugins.ActivityOption();
+        var pairs = PairsOption.Create();
         var table = TableOption.Create();
         var format = OutputFormat.Option();
         var command = new Command("qualify", "Runs the published checks in this process: evidence towards installation and operational qualification.")
         {
-            activity, table, format,
+            activity, pairs, table, format,
         };
         command.SetAction(parsed =>
         {
@@ -27,7 +28,7 @@ internal static class QualifyCommand
                 return OutputFormat.Print(opened.Faults, asJson);
             }
 
-            var report = new Qualifier(new Predictor(opened.Value, null, ActivityModels.Find(parsed.GetValue(activity)!))).Run();
+            var report = new Qualifier(PairsOption.Apply(new Predictor(opened.Value, null, ActivityModels.Find(parsed.GetValue(activity)!)), parsed.GetValue(pairs))).Run();
             Console.Out.Write(asJson ? report.ToJson() + "\n" : report.ToText());
             return report.IsPassed ? ExitStatus.Done : ExitStatus.NoAnswer;
         });

@@ -3,7 +3,7 @@ using System.Linq;
 
 namespace Lyonium.Equilibria;
 
-/// <summary>How the pH of an equilibrium of ladders moves when the equilibrium is changed a little: the derivative at the answer.</summary>
+/// <summary>How the pH of an equilibrium moves when the equilibrium is changed a little: the derivative at the answer.</summary>
 /// <remarks>
 /// The mass and charge balances are differentiated in closed form; the activity coefficients follow the molalities through the model,
 /// whose own derivative along the change is a central difference. The two are made consistent by repetition.
@@ -30,7 +30,7 @@ internal sealed class Sensitivity
         _model = model;
         _molalities = at.MolalitiesMolPerKg.ToArray();
         _ionicStrength = at.IonicStrengthMolPerKg;
-        var ladders = equilibrium.IsLadders ? equilibrium.Ladders : throw new NotSupportedException("Coupled species are not differentiated yet.");
+        var ladders = equilibrium.Ladders;
         _fullest = new int[ladders.Total.Length];
         for (var ladder = 0; ladder < _fullest.Length; ladder++)
         {
@@ -163,6 +163,11 @@ internal sealed class Sensitivity
                 molalities[species] = _molalities[species] * (logs[species] - lnOfMost - mean);
                 charge += (ladders.Charge[i] - ladders.Charge[most]) * molalities[species];
             }
+        }
+
+        foreach (var group in _equilibrium.Groups)
+        {
+            charge += CoupledResponse.Of(group, _molalities, logs, molalities);
         }
 
         return charge;

@@ -174,6 +174,14 @@ public static class FaultKinds
     public static FaultKind NotInThisTable { get; } = new(
         "LYO0502", "substance not in this table", "The recipe's substance '{found}' is not in edition {edition} of the table.", "predict with the table that the recipe was built with");
 
+    /// <summary>A set of ion pairs that the table does not have.</summary>
+    public static FaultKind UnknownPairSet { get; } = new(
+        "LYO0503", "unknown set of ion pairs", "The table has no set of ion pairs '{found}'.", "use some of: {known}; or none");
+
+    /// <summary>A set of ion pairs whose constants do not hold with the activity model.</summary>
+    public static FaultKind PairSetOfAnotherModel { get; } = new(
+        "LYO0504", "set of ion pairs of another model", "The set of ion pairs '{found}' does not belong to the activity model '{model}': what the pairs do is in its coefficients already, or its constants were derived otherwise.", "leave the set out, or use one of the models {models}");
+
     /// <summary>A species made of more than one component.</summary>
     public static FaultKind CoupledSpecies { get; } = new(
         "LYO0601", "coupled species", "The method '{method}' does not solve {found}: a species over more than one component.", "leave the species out, or use a method that solves coupled equilibria");
@@ -215,7 +223,7 @@ public static class FaultKinds
         TableStepOutOfOrder, TableDuplicate, TableMissingSource, TableBadFormula, TableBadLadder, TableNotBalanced, TableUnknownFamily, TableBadValue, TableChangesBase,
         EmptyRecipe, Contradictory, Incomplete, UnknownStock, DuplicateName, MarkBelowContents, NeedsDensity, StrongerThanPossible, NoWater,
         TooManyParts, MoreThanTheRecipeMakes, MixtureOverflows, NestedTooDeep,
-        NotInThisTable,
+        NotInThisTable, UnknownPairSet, PairSetOfAnotherModel,
         CoupledSpecies, FixedActivity, MethodDoesNotApply, DidNotSettle, MethodFailed,
         FileNotFound, IsAFolder, CannotRead,
     ];

@@ -15,7 +15,7 @@ namespace Lyonium.Modelling;
 /// Families stand in the order of the table, so that the numeric problem does not depend on the order of pouring. A family's component is
 /// its base form; each form above it takes its protons with the sum of the pKa of the steps between.
 /// </remarks>
-internal sealed class Doorway(Mixture mixture, IActivityModel model)
+internal sealed class Doorway(Mixture mixture, IActivityModel model, IReadOnlyList<string>? pairSets)
 {
     /// <summary>The temperature in K; that of the mixture unless another is set.</summary>
     public double TemperatureK { get; init; } = mixture.TemperatureK;
@@ -25,17 +25,64 @@ internal sealed class Doorway(Mixture mixture, IActivityModel model)
 
     public Attempt<ModelledMixture> Run()
     {
+        var faults = CheckPairSets();
+        if (faults.Count > 0)
+        {
+            return new Attempt<ModelledMixture>(faults);
+        }
+
+        var sets = PairSets();
         var totals = Totals();
         var families = totals.Select(one => one.Family).ToArray();
         var constants = new StepConstants(families, model, TemperatureK);
+        var solvent = WaterConstants.SolventAt(TemperatureK);
+        var species = families.SelectMany((family, component) => FamilySpecies.Of(family, component, constants.PKa, SizeOfUnlistedIons)).ToArray();
+        var pairs = new PairSpecies(sets, families, species, solvent);
+        var described = Describe(totals);
+        described.AddRange(pairs.All.Select(one => pairs.Describe(one.Pair, one.Species, totals.Select(total => total.MolPerKg).ToArray())));
+        var interactions = model.Uses.HasFlag(IonData.Interactions) ? InteractionsOf(described) : [];
         var equilibrium = new Equilibrium(
             totals.Select(one => Constraint.Total(one.MolPerKg)).ToArray(),
-            families.SelectMany((family, component) => FamilySpecies.Of(family, component, constants.PKa, SizeOfUnlistedIons)).ToArray(),
-            WaterConstants.SolventAt(TemperatureK),
+            [.. species, .. pairs.All.Select(one => one.Species)],
+            solvent,
             WaterConstants.HydrogenIonSize.Value,
-            WaterConstants.HydroxideIonSize.Value);
-        return new Attempt<ModelledMixture>(
-            new ModelledMixture(mixture, equilibrium, families, Describe(totals), Constants(families, constants)));
+            WaterConstants.HydroxideIonSize.Value,
+            interactions.Select(one => new IonInteraction(one.First, one.Second, one.Coefficient.KgPerMol.Value)).ToArray());
+        var used = Constants(families, constants);
+        used.AddRange(pairs.Constants());
+        used.AddRange(interactions.Select(one =>
+            new UsedConstant(one.Coefficient.Cation + " " + one.Coefficient.Anion, "interaction coefficient in kg/mol", one.Coefficient.KgPerMol, one.Coefficient.Layer)));
+        return new Attempt<ModelledMixture>(new ModelledMixture(mixture, equilibrium, families, described, used, pairs.All.Select(one => one.Pair).ToArray(), Array.ConvertAll(sets, set => set.Id)));
+    }
+
+    private PairSet[] PairSets() => mixture.Table.PairSets
+        .Where(set => pairSets is null ? set.IsDefault && set.Models.Contains(model.Name, StringComparer.Ordinal) : pairSets.Contains(set.Id, StringComparer.Ordinal))
+        .ToArray();
+
+    private List<Fault> CheckPairSets()
+    {
+        var faults = new List<Fault>();
+        foreach (var id in pairSets ?? [])
+        {
+            var set = mixture.Table.PairSets.FirstOrDefault(one => string.Equals(one.Id, id, StringComparison.Ordinal));
+            if (set is null)
+            {
+                faults.Add(Fault.Of(FaultKinds.UnknownPairSet, "$", id, ("known", string.Join(", ", mixture.Table.PairSets.Select(one => one.Id)))));
+            }
+            else if (!set.Models.Contains(model.Name, StringComparer.Ordinal))
+            {
+                faults.Add(Fault.Of(FaultKinds.PairSetOfAnotherModel, "$", id, ("model", model.Name), ("models", string.Join(", ", set.Models))));
+            }
+        }
+
+        return faults;
+    }
+
+    private (int First, int Second, InteractionCoefficient Coefficient)[] InteractionsOf(List<ModelledSpecies> species)
+    {
+        var index = species.Select((one, i) => (one.Id, i)).ToDictionary(one => one.Id, one => one.i, StringComparer.Ordinal);
+        return mixture.Table.Interactions.Where(one => index.ContainsKey(one.Cation) && index.ContainsKey(one.Anion))
+            .Select(one => (index[one.Cation], index[one.Anion], one)).ToArray();
     }
 
     /// <summary>The id of the species of a family that holds so many protons more than the base form.</summary>

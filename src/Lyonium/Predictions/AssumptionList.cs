@@ -73,9 +73,21 @@ internal sealed class AssumptionList(SolvedMixture answer, Predictor predictor, 
                 "not listed; Güntelberg's 1/B taken, about 3 Å; the figure is what 9 Å would do to the pH");
         }
 
+        if (predictor.ActivityModel.Uses.HasFlag(IonData.Interactions) && answer.UnlistedInteractions() is { Count: > 0 } missing)
+        {
+            const double mattersFrom = 0.1;
+            yield return new Assumption(
+                "interaction-listed",
+                string.Join(", ", missing),
+                ionicStrength,
+                mattersFrom,
+                ionicStrength <= mattersFrom,
+                "no coefficient is listed and zero is taken; from 0.1 mol/kg on a usual one, 0.1 kg/mol, is 0.01 in log10 γ");
+        }
+
         const double leastWater = 0.9;
         var water = Mixture.WaterKg / Mixture.MassKg;
-        yield return new Assumption("water-is-the-solvent", WholeMixture, water, leastWater, water >= leastWater, CommonPractice);
+        yield return new Assumption(ModelScope.WaterIsTheSolvent, WholeMixture, water, leastWater, water >= leastWater, CommonPractice);
     }
 
     private IEnumerable<Assumption> OfTheConstants()
@@ -93,6 +105,17 @@ internal sealed class AssumptionList(SolvedMixture answer, Predictor predictor, 
                     "published at this ionic strength; carried with " + predictor.ActivityModel.Name);
             }
 
+        }
+
+        foreach (var pair in answer.Modelled.Pairs.Where(one => !one.ChangesWithTemperature))
+        {
+            const double nearK = 0.5;
+            var away = Math.Abs((pair.Log10K.TemperatureK ?? Mixture.TemperatureK) - Mixture.TemperatureK);
+            if (away > nearK)
+            {
+                yield return new Assumption(
+                    ModelScope.ConstantAtItsTemperature, pair.Id, away, nearK, Held: false, "published at another temperature, and used as it is");
+            }
         }
 
         foreach (var step in answer.Modelled.Families.SelectMany(family => family.Steps))

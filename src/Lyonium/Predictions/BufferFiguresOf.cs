@@ -44,7 +44,7 @@ internal sealed class BufferFiguresOf
 
     private static SolvedMixture? ExactAnswer(SolvedMixture answer, IActivityModel model)
     {
-        var attempt = SolvedMixture.TrySolve(answer.Modelled.Mixture, new ExactSolver(), model);
+        var attempt = SolvedMixture.TrySolve(answer.Modelled.Mixture, answer.Modelled.PairSets, new ExactSolver(), model);
         return attempt.Success ? attempt.Value : null;
     }
 
@@ -80,7 +80,7 @@ internal sealed class BufferFiguresOf
     {
         var mixture = _answer.Modelled.Mixture;
         var equalVolumeKg = mixture.VolumeL * WaterDensity.KgPerL(mixture.Recipe.PreparedAtK);
-        var diluted = SolvedMixture.TrySolve(mixture.WithWaterKg(mixture.WaterKg + equalVolumeKg), new ExactSolver(), _model);
+        var diluted = SolvedMixture.TrySolve(mixture.WithWaterKg(mixture.WaterKg + equalVolumeKg), _answer.Modelled.PairSets, new ExactSolver(), _model);
         return diluted.Success ? diluted.Value.Outcome.PH - _answer.Outcome.PH : double.NaN;
     }
 
@@ -108,7 +108,7 @@ internal sealed class BufferFiguresOf
     }
 
     private Equilibrium At(double temperatureK) =>
-        new Doorway(_answer.Modelled.Mixture, _model) { TemperatureK = temperatureK }.Run().GetValueOrThrow().Equilibrium;
+        new Doorway(_answer.Modelled.Mixture, _model, _answer.Modelled.PairSets) { TemperatureK = temperatureK }.Run().GetValueOrThrow().Equilibrium;
 
     private double[] Log10Gammas(Equilibrium equilibrium)
     {

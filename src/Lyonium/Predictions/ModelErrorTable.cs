@@ -7,7 +7,7 @@ using System.Text.Json.Serialization;
 
 namespace Lyonium.Predictions;
 
-internal sealed record ModelErrorBandEntry(double LowMolPerKg, double HighMolPerKg, int Count, double StandardDeviation);
+internal sealed record ModelErrorBandEntry(double LowMolPerKg, double HighMolPerKg, int Solutions, double RootMeanSquareDeviation);
 
 internal sealed record ModelErrorDocument(string Format, IReadOnlyDictionary<string, IReadOnlyList<ModelErrorBandEntry>> Models);
 
@@ -33,7 +33,7 @@ internal static class ModelErrorTable
         }
 
         var band = bands.FirstOrDefault(one => ionicStrengthMolPerKg >= one.LowMolPerKg && ionicStrengthMolPerKg < one.HighMolPerKg);
-        return band is null ? null : new ModelUncertainty(band.StandardDeviation, band.Count, band.LowMolPerKg, band.HighMolPerKg);
+        return band is null ? null : new ModelUncertainty(band.RootMeanSquareDeviation, band.Solutions, band.LowMolPerKg, band.HighMolPerKg);
     }
 
     private static ModelErrorDocument Read()

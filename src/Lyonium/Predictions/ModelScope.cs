@@ -13,12 +13,13 @@ internal static class ModelScope
     public const string WithinListedSolubility = "within-listed-solubility";
     public const string NoReactionButProtonExchange = "no-reaction-but-proton-exchange";
     public const string IonicStrengthInRange = "ionic-strength-in-range";
+    public const string WaterIsTheSolvent = "water-is-the-solvent";
     public const string ConstantCarriedToInfiniteDilution = "constant-carried-to-infinite-dilution";
     public const string ConstantAtItsTemperature = "constant-at-its-temperature";
     public const string ConstantWithinItsTemperatureRange = "constant-within-its-temperature-range";
     public const string MayNotDissolve = "may not dissolve";
 
-    private static readonly string[] NeededByTheChecks = [IonicStrengthInRange, ConstantAtItsTemperature, ConstantWithinItsTemperatureRange];
+    private static readonly string[] NeededByTheChecks = [IonicStrengthInRange, WaterIsTheSolvent, ConstantAtItsTemperature, ConstantWithinItsTemperatureRange];
 
     /// <summary>Why a number is of the homogeneous model only; empty where it is not.</summary>
     public static IReadOnlyList<string> Reasons(IEnumerable<Assumption> assumptions) =>

@@ -1,10 +1,12 @@
 using System;
 using System.Collections.Generic;
 using System.Globalization;
+using System.Linq;
 using Lyonium.Activity;
 using Lyonium.Equilibria;
 using Lyonium.Quantities;
 using Lyonium.Recipes;
+using Lyonium.Solvers;
 using UnitsNet;
 
 namespace Lyonium.Predictions;
@@ -15,13 +17,14 @@ public sealed class Prediction
 {
     private readonly SolvedMixture _answer;
     private readonly Lazy<BufferFigures?> _buffer;
-    private readonly bool _isOwnModel;
+    private readonly bool _isOfTheLibrary;
 
     internal Prediction(SolvedMixture answer, ISolver method, IActivityModel activityModel)
     {
         _answer = answer;
         _buffer = new Lazy<BufferFigures?>(() => BufferFiguresOf.Find(answer, method, activityModel));
-        _isOwnModel = ActivityModels.Find(activityModel.Name)?.GetType() != activityModel.GetType();
+        _isOfTheLibrary = ActivityModels.Find(activityModel.Name)?.GetType() == activityModel.GetType()
+            && Methods.Find(method.Name)?.GetType() == method.GetType();
         Method = method.Name;
         ActivityModel = activityModel.Name;
     }
@@ -37,6 +40,9 @@ public sealed class Prediction
 
     /// <summary>The name of the model of activity coefficients.</summary>
     public string ActivityModel { get; }
+
+    /// <summary>The ids of the sets of ion pairs in use; empty where none are.</summary>
+    public IReadOnlyList<string> PairSets => _answer.Modelled.PairSets;
 
     /// <summary>−log10 of the hydrogen-ion activity, molality scale.</summary>
     public double PH => _answer.Outcome.PH;
@@ -76,11 +82,13 @@ public sealed class Prediction
 
     /// <summary>
     /// How far predictions with this activity model lie from published values at about this ionic strength; <see langword="null"/> where no
-    /// published value speaks for it: a host's own model, another temperature than 0 to 50 °C, an ionic strength above the model's range, a
+    /// published value speaks for it: a host's own model, method, constant or choice of ion pairs, another temperature than 0 to 50 °C, an ionic strength above the model's range, a
     /// constant that was not published for the mixture's temperature or for infinite dilution, or a mixture that is outside of the model.
     /// </summary>
     public ModelUncertainty? ModelUncertainty =>
-        _isOwnModel || ModelScope.IsBeyondWhatWasChecked(Assumptions) ? null : ModelErrorTable.Find(ActivityModel, IonicStrengthMolPerKg, Mixture.TemperatureK);
+        _isOfTheLibrary && HasDefaultPairs && Evidence.Constants.All(one => one.Layer is null) && !ModelScope.IsBeyondWhatWasChecked(Assumptions)
+            ? ModelErrorTable.Find(ActivityModel, IonicStrengthMolPerKg, Mixture.TemperatureK)
+            : null;
 
     /// <summary>Every species: the two ions of water, then family by family from the least protonated form on.</summary>
     public required IReadOnlyList<PredictedSpecies> Species { get; init; }
@@ -113,6 +121,10 @@ public sealed class Prediction
     /// <summary>Retraces the method step by step.</summary>
     /// <returns>The worked steps.</returns>
     public Working Work() => new WorkingBuilder(_answer).Build();
+
+    private bool HasDefaultPairs => Mixture.Table.PairSets
+        .Where(set => set.IsDefault && set.Models.Contains(ActivityModel, StringComparer.Ordinal))
+        .Select(set => set.Id).SequenceEqual(PairSets, StringComparer.Ordinal);
 
     /// <summary>The reported pH in words.</summary>
     /// <returns>Such as <c>pH 2.35</c>; or <c>pH 2.35, of the homogeneous model only: may not dissolve</c>.</returns>

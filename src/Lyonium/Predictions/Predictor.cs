@@ -42,16 +42,28 @@ public sealed class Predictor
     /// <summary>The model of activity coefficients.</summary>
     public IActivityModel ActivityModel { get; }
 
+    /// <summary>The ids of the sets of ion pairs; <see langword="null"/> for the defaults of the activity model.</summary>
+    public IReadOnlyList<string>? PairSets { get; private init; }
+
+    /// <summary>The same predictor with other sets of ion pairs.</summary>
+    /// <param name="ids">
+    /// Ids of the table's sets, such as <c>polyborates</c>; none for no ion pairs at all. A prediction refuses a set that the table does not
+    /// have, or that does not belong to the activity model.
+    /// </param>
+    /// <returns>A new predictor.</returns>
+    public Predictor WithPairSets(params string[] ids) =>
+        new(Table, Method, ActivityModel) { PairSets = Array.AsReadOnly((string[])(ids ?? throw new ArgumentNullException(nameof(ids))).Clone()) };
+
     /// <summary>The same predictor with another method.</summary>
     /// <param name="method">The method.</param>
     /// <returns>A new predictor.</returns>
-    public Predictor With(ISolver method) => new(Table, method ?? throw new ArgumentNullException(nameof(method)), ActivityModel);
+    public Predictor With(ISolver method) => new(Table, method ?? throw new ArgumentNullException(nameof(method)), ActivityModel) { PairSets = PairSets };
 
     /// <summary>The same predictor with another model of activity coefficients.</summary>
     /// <param name="activityModel">The model.</param>
     /// <returns>A new predictor.</returns>
     public Predictor With(IActivityModel activityModel) =>
-        new(Table, Method, activityModel ?? throw new ArgumentNullException(nameof(activityModel)));
+        new(Table, Method, activityModel ?? throw new ArgumentNullException(nameof(activityModel))) { PairSets = PairSets };
 
     /// <summary>Predicts the pH of a recipe.</summary>
     /// <param name="recipe">The recipe.</param>
@@ -129,7 +141,7 @@ public sealed class Predictor
         return new Attempt<Comparison>(new Comparison(recipe, ActivityModel.Name, tolerance, rows));
     }
 
-    private Attempt<SolvedMixture> TrySolve(Mixture mixture) => SolvedMixture.TrySolve(mixture, Method, ActivityModel);
+    private Attempt<SolvedMixture> TrySolve(Mixture mixture) => SolvedMixture.TrySolve(mixture, PairSets, Method, ActivityModel);
 
     // What an error in estimated solute volumes does to the answer is found by answering again.
     private double WaterErrorInPH(Mixture mixture, SolvedMixture answer)
@@ -152,7 +164,7 @@ public sealed class Predictor
             return 0;
         }
 
-        var other = SolvedMixture.TrySolve(new Doorway(mixture, ActivityModel) { SizeOfUnlistedIons = largestAngstrom }, Method, ActivityModel);
+        var other = SolvedMixture.TrySolve(new Doorway(mixture, ActivityModel, PairSets) { SizeOfUnlistedIons = largestAngstrom }, Method, ActivityModel);
         return other.Success ? Math.Abs(other.Value.Outcome.PH - answer.Outcome.PH) : double.NaN;
     }
 

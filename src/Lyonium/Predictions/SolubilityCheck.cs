@@ -62,7 +62,7 @@ internal sealed class SolubilityCheck(SolvedMixture answer, IActivityModel model
     // ions that make the substance are held against those of its saturated solution; their geometric mean says whether they make it again.
     private bool IsTurnedIntoSomethingElse(Substance substance, double solubilityMolPerKg)
     {
-        var saturated = SolvedMixture.TrySolve(Mixture.Alone(substance, solubilityMolPerKg), new ExactSolver(), model);
+        var saturated = SolvedMixture.TrySolve(Mixture.Alone(substance, solubilityMolPerKg), answer.Modelled.PairSets, new ExactSolver(), model);
         if (!saturated.Success)
         {
             return false;

@@ -25,8 +25,8 @@ internal sealed class SolvedMixture
     public Speciation Speciation { get; }
 
     /// <summary>Models a mixture and runs the method, and turns whatever it and the activity model do into an answer or a fault.</summary>
-    public static Attempt<SolvedMixture> TrySolve(Mixture mixture, ISolver method, IActivityModel model) =>
-        TrySolve(new Doorway(mixture, model), method, model);
+    public static Attempt<SolvedMixture> TrySolve(Mixture mixture, IReadOnlyList<string>? pairSets, ISolver method, IActivityModel model) =>
+        TrySolve(new Doorway(mixture, model, pairSets), method, model);
 
     /// <summary>The same through a doorway that has been set otherwise.</summary>
     public static Attempt<SolvedMixture> TrySolve(Doorway doorway, ISolver method, IActivityModel model)
@@ -96,6 +96,26 @@ internal sealed class SolvedMixture
         .Where((one, i) => one.Charge != 0 && double.IsNaN(Modelled.Equilibrium.IonSizesAngstrom[i]) && Speciation.MolalitiesMolPerKg[i] > 0)
         .Select(one => one.Display)
         .ToArray();
+
+    /// <summary>The pairs of ions, each at least a hundredth of the ionic strength, whose interaction coefficient is not listed.</summary>
+    public IReadOnlyList<string> UnlistedInteractions()
+    {
+        const double smallestPart = 0.01;
+        var charges = Modelled.Equilibrium.Charges.ToArray();
+        var listed = new HashSet<(int, int)>();
+        foreach (var one in Modelled.Equilibrium.Interactions)
+        {
+            listed.Add((one.First, one.Second));
+        }
+
+        var ions = Enumerable.Range(0, charges.Length)
+            .Where(i => charges[i] != 0 && Speciation.MolalitiesMolPerKg[i] >= smallestPart * Speciation.IonicStrengthMolPerKg).ToArray();
+        return ions.Where(i => charges[i] > 0)
+            .SelectMany(cation => ions.Where(i => charges[i] < 0).Select(anion => (cation, anion)))
+            .Where(pair => !listed.Contains(pair))
+            .Select(pair => Modelled.Species[pair.cation].Display + " " + Modelled.Species[pair.anion].Display)
+            .ToArray();
+    }
 
     // An answer whose coefficients or hydrogen ion overflow cannot be written down, whatever its pH.
     private static bool IsRepresentable(Speciation speciation)

@@ -19,7 +19,7 @@ public sealed record PublishedCheck
     /// <summary>How the figure reached the library.</summary>
     public required Known Known { get; init; }
 
-    /// <summary>What is checked, such as <c>pH</c>; <c>docs/qualification.md</c> lists the words.</summary>
+    /// <summary>What is checked, such as <c>pH</c>; <c>docs/guides/qualification.md</c> lists the words.</summary>
     public required string Quantity { get; init; }
 
     /// <summary>The unit of the figure as a UCUM code; <c>1</c> for a number.</summary>

@@ -22,14 +22,15 @@ internal sealed record CheckEntry(
     [property: JsonIgnore(Condition = JsonIgnoreCondition.Never)] double? Obtained,
     double? Deviation,
     double? Tolerance,
+    double? IonicStrengthMolPerKg,
     string Reason,
     string Verdict,
     bool? ValueNotRead,
     string? Failure);
 
-internal sealed record SumEntry(int Checks, int Holds, int AgreesValueNotRead, int Fails, int Reported);
+internal sealed record SumEntry(int Checks, int Holds, int HoldsAgainstDerived, int AgreesValueNotRead, int Fails, int Reported);
 
-internal sealed record ModelErrorEntry(double LowMolPerKg, double HighMolPerKg, int Count, double StandardDeviation);
+internal sealed record ModelErrorEntry(double LowMolPerKg, double HighMolPerKg, int Solutions, double RootMeanSquareDeviation);
 
 internal sealed record EnvironmentLayerEntry(string Name, string Edition, string Sha256);
 
@@ -78,8 +79,8 @@ internal static class QualificationJson
         "lyonium-qualification/1",
         QualificationWords.WhatItIs,
         Describe(report.Environment),
-        new SumEntry(report.Outcomes.Count, report.Holds, report.AgreesValueNotRead, report.Fails, report.Reported),
-        report.ModelErrors.Select(one => new ModelErrorEntry(one.LowMolPerKg, one.HighMolPerKg, one.Count, one.StandardDeviation)).ToArray(),
+        new SumEntry(report.Outcomes.Count, report.Holds, report.HoldsAgainstDerived, report.AgreesValueNotRead, report.Fails, report.Reported),
+        report.ModelErrors.Select(one => new ModelErrorEntry(one.LowMolPerKg, one.HighMolPerKg, one.Solutions, one.RootMeanSquareDeviation)).ToArray(),
         report.Outcomes.Select(Describe).ToArray());
 
     private static EnvironmentEntry Describe(QualificationEnvironment one) => new(
@@ -110,6 +111,7 @@ internal static class QualificationJson
         double.IsNaN(one.Obtained) ? null : one.Obtained,
         double.IsNaN(one.Obtained) ? null : one.Deviation,
         one.Check.Tolerance,
+        one.IonicStrengthMolPerKg,
         one.Check.Reason,
         QualificationWords.Word(one.Verdict),
         one.AgreesValueNotRead ? true : null,

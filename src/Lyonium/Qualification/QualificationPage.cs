@@ -27,11 +27,11 @@ internal sealed class QualificationPage(QualificationReport report)
 
     private void WriteModelErrors(StringBuilder page)
     {
-        page.Append("## Error of the activity model in pH\n\nRoot mean square deviation of the judged pH below, 0 to 50 °C.\n\n");
-        page.Append("| ionic strength, mol/kg | error | published values |\n|---|---|---|\n");
+        page.Append("## Error of the activity model in pH\n\nRoot mean square deviation of the judged pH below, 0 to 50 °C, each solution counted once.\n\n");
+        page.Append("| ionic strength, mol/kg | error | solutions |\n|---|---|---|\n");
         foreach (var band in report.ModelErrors)
         {
-            page.Append(FormattableString.Invariant($"| {band.LowMolPerKg} to {band.HighMolPerKg} | {band.StandardDeviation:F4} | {band.Count} |\n"));
+            page.Append(FormattableString.Invariant($"| {band.LowMolPerKg} to {band.HighMolPerKg} | {band.RootMeanSquareDeviation:F4} | {band.Solutions} |\n"));
         }
     }
 

@@ -1,5 +1,6 @@
 using System.Collections.Generic;
 using System.Linq;
+using Lyonium.Provenance;
 
 namespace Lyonium.Qualification;
 
@@ -23,8 +24,11 @@ public sealed class QualificationReport
     /// <summary>Every check and what came of it.</summary>
     public IReadOnlyList<CheckOutcome> Outcomes { get; }
 
-    /// <summary>How many checks hold against a figure that was seen in its source or derived from one.</summary>
-    public int Holds => Outcomes.Count(one => one.Verdict == CheckVerdict.Holds && !one.AgreesValueNotRead);
+    /// <summary>How many checks hold against a figure that was seen in its source.</summary>
+    public int Holds => Outcomes.Count(one => one.Verdict == CheckVerdict.Holds && one.Check.Known is (Known.Read or Known.ReadAndMemory));
+
+    /// <summary>How many checks hold against a figure that was computed outside of the library from published equations.</summary>
+    public int HoldsAgainstDerived => Outcomes.Count(one => one.Verdict == CheckVerdict.Holds && one.Check.Known == Known.Derived);
 
     /// <summary>How many agree with a figure that was recalled and not seen in its source.</summary>
     public int AgreesValueNotRead => Outcomes.Count(one => one.AgreesValueNotRead);

@@ -77,7 +77,7 @@ internal sealed class QualificationText(QualificationReport report)
     {
         Line("Error of the activity model in pH, root mean square deviation, 0 to 50 Cel");
         Table(report.ModelErrors
-            .Select(one => new[] { FormattableString.Invariant($"{one.LowMolPerKg} to {one.HighMolPerKg} mol/kg"), FormattableString.Invariant($"{one.StandardDeviation:F4}"), FormattableString.Invariant($"{one.Count} published values") })
+            .Select(one => new[] { FormattableString.Invariant($"{one.LowMolPerKg} to {one.HighMolPerKg} mol/kg"), FormattableString.Invariant($"{one.RootMeanSquareDeviation:F4}"), FormattableString.Invariant($"{one.Solutions} solutions") })
             .Prepend(["ionic strength", "error", "from"])
             .ToArray());
     }

@@ -70,7 +70,7 @@ internal static class QualificationWords
     public static string Heading(PublishedCheck check) => check.Quantity + (check.Unit == "1" ? "" : ", " + check.Unit) + ": " + check.Title;
 
     public static string Sum(QualificationReport report) => FormattableString.Invariant(
-        $"{report.Outcomes.Count} checks: {report.Holds} hold, {report.AgreesValueNotRead} agree with a value not read, {report.Fails} fail, {report.Reported} are reported without a tolerance.");
+        $"{report.Outcomes.Count} checks: {report.Holds} hold, {report.HoldsAgainstDerived} hold against a derived value, {report.AgreesValueNotRead} agree with a value not read, {report.Fails} fail, {report.Reported} are reported without a tolerance.");
 
     private static string Plain(double value) => NumberText.Shortest(value);
 

@@ -45,7 +45,7 @@ internal sealed record BufferEntry(
 
 internal sealed record BandEntry(double Low, double High, string Unit);
 
-internal sealed record ModelUncertaintyEntry(double StandardUncertainty, int PublishedValues, BandEntry IonicStrength, string Scope);
+internal sealed record ModelUncertaintyEntry(double StandardUncertainty, int Solutions, BandEntry IonicStrength, string Scope);
 
 internal sealed record UncertaintyEntry(ModelUncertaintyEntry Model);
 
@@ -57,6 +57,7 @@ internal sealed record RecordDocument(
     ReportedEntry Reported,
     string Method,
     string ActivityModel,
+    IReadOnlyList<string> PairSets,
     NumberWithUnit IonicStrength,
     NumberWithUnit Volume,
     NumberWithUnit Water,

@@ -36,6 +36,7 @@ public static class RecordJson
         new ReportedEntry(prediction.Reported, RuleOf(prediction)),
         prediction.Method,
         prediction.ActivityModel,
+        prediction.PairSets,
         new NumberWithUnit(prediction.IonicStrengthMolPerKg, "mol/kg"),
         VolumeOf(prediction),
         new NumberWithUnit(prediction.Mixture.WaterKg, "kg"),
@@ -56,7 +57,7 @@ public static class RecordJson
         one.TemperatureCoefficientLeavesOut.Count == 0 ? null : one.TemperatureCoefficientLeavesOut);
 
     private static ModelUncertaintyEntry Describe(ModelUncertainty one) =>
-        new(one.StandardUncertainty, one.Checks, new BandEntry(one.LowMolPerKg, one.HighMolPerKg, "mol/kg"), ModelUncertainty.Scope);
+        new(one.StandardUncertainty, one.Solutions, new BandEntry(one.LowMolPerKg, one.HighMolPerKg, "mol/kg"), ModelUncertainty.Scope);
 
     private static string RuleOf(Prediction prediction) =>
         "two decimals"

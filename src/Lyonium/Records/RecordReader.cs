@@ -16,7 +16,7 @@ internal sealed class RecordReader
         "temperature", "species", "assumptions", "iterates", "cautions", "evidence", "notes",
     ];
 
-    private static readonly string[] KnownLater = [.. Known, "buffer", "uncertainty"];
+    private static readonly string[] KnownLater = [.. Known, "pairSets", "buffer", "uncertainty"];
 
     private readonly JsonPlace _root;
     private readonly JsonPlace? _recipe;
@@ -30,6 +30,7 @@ internal sealed class RecordReader
         PHydrogenConcentration = root.Need(properties, "pHydrogenConcentration")?.Number();
         Method = root.Need(properties, "method")?.Text();
         ActivityModel = root.Need(properties, "activityModel")?.Text();
+        PairSets = properties.TryGetValue("pairSets", out var sets) ? sets.Items().Select(one => one.Text()).OfType<string>().ToArray() : [];
         IonicStrength = Number(root.Need(properties, "ionicStrength"));
         Water = Number(root.Need(properties, "water"));
         foreach (var species in root.Need(properties, "species")?.Items() ?? [])
@@ -57,6 +58,9 @@ internal sealed class RecordReader
     public string? Method { get; }
 
     public string? ActivityModel { get; }
+
+    /// <summary>The sets of ion pairs; a /1 record has none, and none were in use.</summary>
+    public string[] PairSets { get; }
 
     public double? IonicStrength { get; }
 

@@ -67,7 +67,7 @@ public sealed class RecordReplay
             return faults.Attempt<ReplayReport>(null);
         }
 
-        var prediction = new Predictor(_table, method, model).TryPredict(recipe);
+        var prediction = new Predictor(_table, method, model).WithPairSets(record.PairSets).TryPredict(recipe);
         return prediction.Success
             ? new Attempt<ReplayReport>(new ReplayComparison(record, prediction.Value).Report())
             : new Attempt<ReplayReport>(prediction.Faults);

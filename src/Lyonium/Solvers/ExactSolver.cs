@@ -98,7 +98,9 @@ public sealed class ExactSolver : ISolver
                     return next;
                 }
 
-                if (!(next > low && next < high))
+                // Steps that go to and fro inside the bracket do not narrow it; halving does.
+                var isSlow = _evaluations > 40 && _evaluations % 2 == 0;
+                if (isSlow || !(next > low && next < high))
                 {
                     next = Math.Sqrt(low) * Math.Sqrt(high);
                     move = Math.Log(next / activity);

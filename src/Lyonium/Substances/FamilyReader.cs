@@ -19,7 +19,7 @@ internal sealed class FamilyReader(SourcedValueReader values, string version)
     public IReadOnlyList<Family> Read(JsonPlace? list)
     {
         var families = new List<Family>();
-        var ids = new HashSet<string>(StringComparer.Ordinal);
+        var ids = new HashSet<string>(StringComparer.Ordinal) { "water" };
         foreach (var place in list?.Items() ?? [])
         {
             if (ReadFamily(place) is not { } family)
@@ -33,7 +33,7 @@ internal sealed class FamilyReader(SourcedValueReader values, string version)
             }
             else
             {
-                place.Faults.Add(FaultKinds.TableDuplicate, place.Path + ".id", family.Id, ("owner", "another family"));
+                place.Faults.Add(FaultKinds.TableDuplicate, place.Path + ".id", family.Id, ("owner", family.Id == "water" ? "the ions of water" : "another family"));
             }
         }
 

@@ -74,6 +74,34 @@ public sealed class SensitivityTests
         }
     }
 
+    // Coupled components: a constant shifted, and base added.
+    [Theory]
+    [InlineData("ideal")]
+    [InlineData("bates-guggenheim")]
+    public void PHPer_coupledSystems_agreesWithDifferences(string name)
+    {
+        var model = ActivityModels.Find(name)!;
+        var compared = 0;
+        for (var i = 0; i < 400; i++)
+        {
+            var system = CoupledSystems.At(i);
+            var outcome = new ExactSolver().Solve(system, model);
+            if (outcome.Status != SolverStatus.Solved || outcome.InputResolution > 1e-13 || Speciation.At(system, model, outcome.PH).IonicStrengthMolPerKg > 0.5)
+            {
+                continue;
+            }
+
+            var sensitivity = new Sensitivity(system, model, Speciation.At(system, model, outcome.PH));
+            var per = new double[system.SpeciesCount];
+            var shifted = i % system.Species.Count;
+            per[shifted + Equilibrium.WaterIons] = 1;
+            AssertClose(sensitivity.PHPer(new Change { Log10K = per }), Difference(step => PHWith(system, model, shifted, step, 0), 1e-3), $"{name}, {i}");
+            compared++;
+        }
+
+        Assert.True(compared > 50, $"{compared} compared");
+    }
+
     // A strong acid alone: pH = −log m − log γ with I = m, so dpH/db = 1/(ln 10 · m) · (1 + d ln γ/d ln I) for base that takes acid away
     // and leaves the ionic strength. Davies: d log γ/dI = −A (1/(2 √I (1 + √I)²) − 0.3).
     [Fact]

@@ -1,6 +1,7 @@
 using System;
 using System.Collections.Generic;
 using System.Linq;
+using Lyonium.Activity;
 using Lyonium.Equilibria;
 using Lyonium.Faults;
 using Lyonium.Predictions;
@@ -98,7 +99,9 @@ public sealed class EveryKindTests
     private static IEnumerable<Fault> OfMethods()
     {
         var recipe = RecipeJson.Read(RecipeText.With(Kilogram));
-        return Enum.GetValues<SolverStatus>().SelectMany(status => new Predictor().With(new Refusing(status)).TryPredict(recipe).Faults);
+        var pairs = new[] { "no-such-set", "polyborates" }
+            .SelectMany(set => new Predictor().With(new IdealModel()).WithPairSets(set).TryPredict(recipe).Faults);
+        return pairs.Concat(Enum.GetValues<SolverStatus>().SelectMany(status => new Predictor().With(new Refusing(status)).TryPredict(recipe).Faults));
     }
 
     private sealed class Refusing(SolverStatus status) : ISolver

@@ -109,7 +109,7 @@ public sealed class ShiftToTests
         Assert.Equal(0, step.ValidRange!.Beyond(298.15));
         if (step.Equation is null)
         {
-            Assert.Equal(step.HeatCapacityJPerMolK is null ? (10, 40) : (0, 60), Range(step));
+            Assert.Equal(step.HeatCapacityJPerMolK is null ? (10, 40) : (0, 50), Range(step));
         }
     });
 

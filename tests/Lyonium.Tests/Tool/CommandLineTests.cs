@@ -57,7 +57,7 @@ public sealed class CommandLineTests
     [Theory]
     [InlineData("chloroacetic acid", "pK = 1049.05/T − 5.0273 + 0.014654 T", "0 to 40 Cel with the equation", "ion size of ClCH₂COO⁻  4.5 Å")]
     [InlineData("TAPSO", "pK = 2254.0057/T − 4.9783 + 0.88672 ln T", "5 to 55 Cel with the equation")]
-    [InlineData("phosphate", "heat capacity", "0 to 60 Cel with the enthalpy and the heat capacity", "ion size of PO₄³⁻")]
+    [InlineData("phosphate", "heat capacity", "0 to 50 Cel with the enthalpy and the heat capacity", "ion size of PO₄³⁻")]
     [InlineData("edta", "10 to 40 Cel with the enthalpy", "how it changes with temperature is not known")]
     [InlineData("sodium chloride", "ion size of Na⁺", "ion size of Cl⁻")]
     [InlineData("sodium", "ion size of Na⁺", "4.25 Å")]
