@@ -51,13 +51,8 @@ internal sealed class ConstantsText(SubstanceTable table, IAnsiConsole console)
                 $"{points.Count} points from {NumberFormat.Short(first.MassFraction * 100)} to {NumberFormat.Short(last.MassFraction * 100)} %: {Source(first.DensityKgPerL)}");
         }
 
-        foreach (var spectator in substance.Brings.Select(brought => brought.Family).Where(family => family.IsSpectator))
-        {
-            AddIonSizes(grid, spectator);
-        }
-
         console.Write(grid);
-        foreach (var one in substance.Brings.Select(brought => brought.Family).Where(family => !family.IsSpectator))
+        foreach (var one in substance.Brings.Select(brought => brought.Family))
         {
             console.WriteLine();
             Print(one);
@@ -103,6 +98,16 @@ internal sealed class ConstantsText(SubstanceTable table, IAnsiConsole console)
         }
 
         AddIonSizes(grid, family);
+        foreach (var (set, pair) in table.PairSets.SelectMany(set => set.Species.Select(pair => (set, pair))).Where(one => one.pair.FormedFrom.Any(part => IsOf(part.Key, family))))
+        {
+            AddValue(grid, "log K of " + pair.Formula.Display, pair.Log10K, "in " + set.Id + (set.IsDefault ? "" : ", on request"));
+            AddValue(grid, "  enthalpy", pair.EnthalpyKJPerMol, "kJ/mol");
+        }
+
+        foreach (var one in table.Interactions.Where(one => IsOf(one.Cation, family) || IsOf(one.Anion, family)))
+        {
+            AddValue(grid, $"interaction {one.Cation} {one.Anion}", one.KgPerMol, "kg/mol");
+        }
 
         if (family.Note.Length > 0)
         {
@@ -111,6 +116,8 @@ internal sealed class ConstantsText(SubstanceTable table, IAnsiConsole console)
 
         console.Write(grid);
     }
+
+    private static bool IsOf(string speciesId, Family family) => speciesId.StartsWith(family.Id + ":", System.StringComparison.Ordinal);
 
     private static Grid Pairs() => new Grid().AddColumn(new GridColumn { Padding = new Padding(2, 0, 2, 0), NoWrap = true }).AddColumn();
 

@@ -118,7 +118,7 @@ internal sealed class AssumptionList(SolvedMixture answer, Predictor predictor, 
             }
         }
 
-        foreach (var step in answer.Modelled.Families.SelectMany(family => family.Steps))
+        foreach (var step in answer.Modelled.Families.Where((_, i) => answer.Modelled.Equilibrium.Constraints[i].Value > 0).SelectMany(family => family.Steps))
         {
             if (OffItsTemperature(step) is { } flag)
             {

@@ -19,6 +19,8 @@ internal static class ModelScope
     public const string ConstantWithinItsTemperatureRange = "constant-within-its-temperature-range";
     public const string MayNotDissolve = "may not dissolve";
 
+    private const double FarOut = 10;
+    private const double HighestOfAny = 5; // mol/kg
     private static readonly string[] NeededByTheChecks = [IonicStrengthInRange, WaterIsTheSolvent, ConstantAtItsTemperature, ConstantWithinItsTemperatureRange];
 
     /// <summary>Why a number is of the homogeneous model only; empty where it is not.</summary>
@@ -34,6 +36,7 @@ internal static class ModelScope
     {
         WithinListedSolubility => MayNotDissolve,
         NoReactionButProtonExchange => "consumes itself",
+        IonicStrengthInRange when one.Figure > Math.Max(FarOut * (one.Limit ?? 0), HighestOfAny) => "ionic strength far beyond the activity model",
         _ => null,
     };
 }

@@ -79,6 +79,8 @@ public sealed class ConstantsPageTests
         page.Append(Carried.Replace("\r\n", "\n", StringComparison.Ordinal)).Append('\n');
         WriteFamilies(page);
         WriteIonSizes(page);
+        WriteInteractions(page);
+        WritePairSets(page);
         WriteSources(page);
         return page.ToString();
     }
@@ -151,6 +153,43 @@ public sealed class ConstantsPageTests
         {
             Row(page, Number(size.Key), string.Join(", ", size.Select(one => $"{one.Display} ({one.Name})")));
         }
+    }
+
+    private static void WriteInteractions(StringBuilder page)
+    {
+        page.Append("\n## Interaction coefficients\n\nOf specific ion interaction theory, in kg/mol, at 25 °C; u is the standard uncertainty.\n\n");
+        page.Append("| cation | anion | ε | u | source | known |\n|---|---|---|---|---|---|\n");
+        foreach (var one in Table.Interactions)
+        {
+            Row(page, Display(one.Cation), Display(one.Anion), Signed(one.KgPerMol.Value), one.KgPerMol.StandardUncertainty is double u ? Number(u) : "", one.KgPerMol.Source.Key, one.KgPerMol.KnownAs);
+        }
+    }
+
+    private static void WritePairSets(StringBuilder page)
+    {
+        page.Append("\n## Ion pairs, dimers and polymers\n\nlog K of the formation at infinite dilution and 25 °C; water set free or taken up is not written. ΔH in kJ/mol.\n");
+        foreach (var set in Table.PairSets)
+        {
+            page.Append("\n`").Append(set.Id).Append("`: ").Append(set.Name).Append(set.IsDefault ? ", a default of " : ", on request with ").AppendJoin(", ", set.Models).Append(".\n\n");
+            page.Append("| species | formed from | log K | ΔH | source | known |\n|---|---|---|---|---|---|\n");
+            foreach (var one in set.Species)
+            {
+                var parts = string.Join(" + ", one.FormedFrom.Select(part => (part.Value == 1 ? "" : part.Value.ToString(CultureInfo.InvariantCulture) + " ") + Display(part.Key)));
+                Row(page, one.Formula.Display, parts, Signed(one.Log10K.Value), one.EnthalpyKJPerMol is { } enthalpy ? Signed(enthalpy.Value) : "", one.Log10K.Source.Key, one.Log10K.KnownAs);
+            }
+        }
+    }
+
+    private static string Display(string speciesId)
+    {
+        if (speciesId.StartsWith("water:", StringComparison.Ordinal))
+        {
+            return speciesId == "water:2" ? "H⁺" : "OH⁻";
+        }
+
+        var parts = speciesId.Split(':');
+        var family = Table.Families.Single(one => one.Id == parts[0]);
+        return family.Forms[family.Forms.Count - 1 - int.Parse(parts[1], CultureInfo.InvariantCulture)].Display;
     }
 
     private static string Course(DissociationStep step)
