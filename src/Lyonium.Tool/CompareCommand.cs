@@ -28,6 +28,7 @@ internal static class CompareCommand
         var table = TableOption.Create();
         var format = OutputFormat.Option();
         var command = new Command("compare", "Predicts a recipe with every method, beside the exact answer.") { recipe, activity, tolerance, table, format };
+        TableOption.RefuseBothOnStandardInput(command, recipe, table);
         command.SetAction(parsed =>
         {
             var asJson = OutputFormat.IsJson(parsed.GetValue(format)!);

@@ -17,7 +17,7 @@ internal static class ExitStatus
     /// <summary>The command line was wrong.</summary>
     public const int WrongCommandLine = 2;
 
-    /// <summary>The method does not apply, did not settle or failed.</summary>
+    /// <summary>The method does not apply, did not settle or failed; or a published check of <c>qualify</c> fails.</summary>
     public const int NoAnswer = 3;
 
     /// <summary>The status for faults: those of methods have codes from LYO0600 on.</summary>

@@ -23,6 +23,11 @@ internal static class InputFile
                 return read(input);
             }
 
+            if (file.Trim().Length == 0)
+            {
+                return Refuse<T>(FaultKinds.CannotRead, file, ("detail", "a file has a name."));
+            }
+
             if (Directory.Exists(file))
             {
                 return Refuse<T>(FaultKinds.IsAFolder, file);

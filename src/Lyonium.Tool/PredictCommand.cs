@@ -20,6 +20,7 @@ internal static class PredictCommand
         var steps = new Option<bool>("--steps") { Description = "show the worked steps after the answer (text only)" };
         var format = OutputFormat.Option();
         var command = new Command("predict", "Predicts the pH of a recipe.") { recipe, method, activity, pairs, table, steps, format };
+        TableOption.RefuseBothOnStandardInput(command, recipe, table);
         command.SetAction(parsed =>
         {
             var asJson = OutputFormat.IsJson(parsed.GetValue(format)!);

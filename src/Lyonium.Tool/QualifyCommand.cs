@@ -3,6 +3,7 @@ using System.CommandLine;
 using Lyonium.Activity;
 using Lyonium.Predictions;
 using Lyonium.Qualification;
+using Lyonium.Solvers;
 
 namespace Lyonium.Tool;
 
@@ -11,13 +12,14 @@ internal static class QualifyCommand
 {
     public static Command Create()
     {
+        var method = Plugins.MethodOption();
         var activity = Plugins.ActivityOption();
         var pairs = PairsOption.Create();
         var table = TableOption.Create();
         var format = OutputFormat.Option();
         var command = new Command("qualify", "Runs the published checks in this process: evidence towards installation and operational qualification.")
         {
-            activity, pairs, table, format,
+            method, activity, pairs, table, format,
         };
         command.SetAction(parsed =>
         {
@@ -28,8 +30,18 @@ internal static class QualifyCommand
                 return OutputFormat.Print(opened.Faults, asJson);
             }
 
-            var report = new Qualifier(PairsOption.Apply(new Predictor(opened.Value, null, ActivityModels.Find(parsed.GetValue(activity)!)), parsed.GetValue(pairs))).Run();
-            Console.Out.Write(asJson ? report.ToJson() + "\n" : report.ToText());
+            var predictor = new Predictor(
+                opened.Value, Methods.Find(parsed.GetValue(method)!), ActivityModels.Find(parsed.GetValue(activity)!));
+            var report = new Qualifier(PairsOption.Apply(predictor, parsed.GetValue(pairs))).Run();
+            if (asJson)
+            {
+                Console.Out.WriteLine(report.ToJson());
+            }
+            else
+            {
+                Terminal.Print(new QualificationLines(report).Print);
+            }
+
             return report.IsPassed ? ExitStatus.Done : ExitStatus.NoAnswer;
         });
         return command;

@@ -46,7 +46,12 @@ internal static class DocumentFormat
         var kind = found.StartsWith(name + "/", StringComparison.Ordinal) && IsVersion(found.Substring(name.Length + 1))
             ? FaultKinds.FormatTooNew
             : FaultKinds.WrongFormat;
-        root.Faults.Add(kind, place.Path, found, ("expected", string.Join(" or ", versions.Select(version => name + "/" + version))));
+        root.Faults.Add(
+            kind,
+            place.Path,
+            found,
+            ("expected", string.Join(" or ", versions.Select(version => name + "/" + version))),
+            ("latest", name + "/" + versions[versions.Length - 1]));
         return null;
     }
 

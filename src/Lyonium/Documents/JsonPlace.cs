@@ -30,6 +30,9 @@ internal sealed class JsonPlace
 
     public bool IsText => _element.ValueKind == JsonValueKind.String;
 
+    /// <summary>The value itself.</summary>
+    public JsonElement Element => _element;
+
     /// <summary>The value as it is written.</summary>
     public string RawText => _element.GetRawText();
 
@@ -37,7 +40,13 @@ internal sealed class JsonPlace
     public string? RawObject() => Is(JsonValueKind.Object, "an object") ? RawText : null;
 
     /// <summary>The properties of an object; each one that is not known, or stands twice, is told.</summary>
-    public IReadOnlyDictionary<string, JsonPlace> Properties(params string[] known)
+    public IReadOnlyDictionary<string, JsonPlace> Properties(params string[] known) => Properties(known, [], "");
+
+    /// <summary>The properties of an object of an earlier version; what only a later one has is told with that version.</summary>
+    /// <param name="known">What this version has.</param>
+    /// <param name="later">What only the later version has.</param>
+    /// <param name="laterFormat">The later version, as its documents name it.</param>
+    public IReadOnlyDictionary<string, JsonPlace> Properties(string[] known, string[] later, string laterFormat)
     {
         var properties = new Dictionary<string, JsonPlace>(StringComparer.Ordinal);
         if (!Is(JsonValueKind.Object, "an object"))
@@ -62,7 +71,9 @@ internal sealed class JsonPlace
             var path = Path + PathStep.Of(name);
             if (isUnknown)
             {
-                _faults.Add(FaultKinds.UnknownProperty, path, name, ("known", string.Join(", ", known)));
+                _faults.Add(FaultKinds.UnknownProperty, path, name, ("known", string.Join(", ", known)), ("suggestion", later.Contains(name, StringComparer.Ordinal)
+                    ? $"set \"format\" to \"{laterFormat}\", which has it"
+                    : $"use {string.Join(", ", known)}; free data goes under \"notes\" of the document"));
             }
             else if (properties.ContainsKey(name))
             {

@@ -207,6 +207,7 @@ internal ref struct ChargeBalance
 
     private double UseGammasAt(double ionicStrength)
     {
+        _nextLog10Gammas.Fill(double.NaN); // so that a model that leaves one out is refused
         _model.Log10Gammas(_equilibrium, ionicStrength, _molalities, _nextLog10Gammas);
         _gammasAt = ionicStrength;
         if (_nextLog10Gammas.SequenceEqual(_log10Gammas))

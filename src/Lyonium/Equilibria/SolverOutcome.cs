@@ -4,7 +4,7 @@ using System.Collections.Generic;
 namespace Lyonium.Equilibria;
 
 /// <summary>What a solver hands back, in numbers.</summary>
-/// <remarks>Immutable; safe to share between threads.</remarks>
+/// <remarks>The default value is no outcome, and so no answer. Immutable; safe to share between threads.</remarks>
 public readonly record struct SolverOutcome
 {
     /// <summary>How the method ended.</summary>

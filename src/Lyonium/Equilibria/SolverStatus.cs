@@ -3,6 +3,9 @@ namespace Lyonium.Equilibria;
 /// <summary>How a method ended.</summary>
 public enum SolverStatus
 {
+    /// <summary>No outcome: nothing was said. It is no answer.</summary>
+    None,
+
     /// <summary>There is an answer.</summary>
     Solved,
 

@@ -48,15 +48,15 @@ public static class FaultKinds
 
     /// <summary>A document of another format.</summary>
     public static FaultKind WrongFormat { get; } = new(
-        "LYO0203", "wrong format", "The document's format is '{found}', and {expected} is read here.", "set \"format\" to \"{expected}\"");
+        "LYO0203", "wrong format", "The document's format is '{found}', and {expected} is read here.", "set \"format\" to \"{latest}\"");
 
     /// <summary>A document of a later version of the format.</summary>
     public static FaultKind FormatTooNew { get; } = new(
-        "LYO0204", "format too new", "The document's format is '{found}', which is newer than this library's {expected}.", "use a later version of the library, or write the document as {expected}");
+        "LYO0204", "format too new", "The document's format is '{found}', which is newer than this library's {expected}.", "use a later version of the library, or set \"format\" to \"{latest}\" and leave out what it does not have");
 
     /// <summary>A property that the format does not know.</summary>
     public static FaultKind UnknownProperty { get; } = new(
-        "LYO0205", "unknown property", "'{found}' is not a property of this object.", "use {known}; free data goes under \"notes\" of the document");
+        "LYO0205", "unknown property", "'{found}' is not a property of this object.", "{suggestion}");
 
     /// <summary>A property that stands twice.</summary>
     public static FaultKind DuplicateProperty { get; } = new(
@@ -196,7 +196,7 @@ public static class FaultKinds
 
     /// <summary>A method that did not settle on an answer.</summary>
     public static FaultKind DidNotSettle { get; } = new(
-        "LYO0604", "did not settle", "The method '{method}' did not settle: {found}.", "use the method 'exact' within the range of the activity model");
+        "LYO0604", "did not settle", "The method '{method}' did not settle: {found}.", "{suggestion}");
 
     /// <summary>A method or an activity model that failed or gave an impossible answer.</summary>
     public static FaultKind MethodFailed { get; } = new(

@@ -1,4 +1,5 @@
 using System.Collections.Generic;
+using Lyonium.Quantities;
 using UnitsNet;
 
 namespace Lyonium.Predictions;
@@ -34,4 +35,13 @@ public sealed record BufferFigures
 
     /// <summary>The ids of the dissociation steps whose change with temperature the table does not give; empty where it gives all.</summary>
     public required IReadOnlyList<string> TemperatureCoefficientLeavesOut { get; init; }
+
+    /// <summary>The figures in words, the same in every culture.</summary>
+    /// <returns>Such as <c>capacity 0.0577 mol/L, dilution value 0.08, temperature coefficient -0.0028 1/K</c>.</returns>
+    public override string ToString() =>
+        $"capacity {NumberText.Shortest(CapacityMolPerL)} mol/L, dilution value {Text(DilutionValue)}, temperature coefficient {Text(TemperatureCoefficientPerK)}"
+        + (double.IsNaN(TemperatureCoefficientPerK) ? "" : " 1/K")
+        + (TemperatureCoefficientLeavesOut.Count == 0 ? "" : " without " + string.Join(", ", TemperatureCoefficientLeavesOut));
+
+    private static string Text(double value) => double.IsNaN(value) ? "unknown" : NumberText.Shortest(value);
 }

@@ -52,7 +52,9 @@ internal sealed class BufferFiguresOf
     {
         var mixture = _answer.Modelled.Mixture;
         var capacity = mixture.WaterKg / mixture.VolumeL / _sensitivity.PHPer(Change.StrongBase);
-        return double.IsNaN(capacity) || double.IsInfinity(capacity)
+
+        // A mixture whose pH falls when base comes in is none: a model far beyond its range says so.
+        return !(capacity > 0) || double.IsInfinity(capacity)
             ? null
             : new BufferFigures
             {

@@ -1,3 +1,5 @@
+using Lyonium.Quantities;
+
 namespace Lyonium.Predictions;
 
 /// <summary>How far predictions with an activity model lie from published pH values, at about the ionic strength of a prediction.</summary>
@@ -14,4 +16,9 @@ public sealed record ModelUncertainty(double StandardUncertainty, int Solutions,
 {
     /// <summary>What it covers and what it leaves out, in words.</summary>
     public const string Scope = "homogeneous aqueous model; a comparison with a glass electrode has a liquid-junction term on top";
+
+    /// <summary>The uncertainty in words, the same in every culture.</summary>
+    /// <returns>Such as <c>0.012 in pH, from 25 published solutions at 0.01 to 0.1 mol/kg</c>.</returns>
+    public override string ToString() =>
+        $"{NumberText.Shortest(StandardUncertainty)} in pH, from {NumberText.Shortest(Solutions)} published solutions at {NumberText.Shortest(LowMolPerKg)} to {NumberText.Shortest(HighMolPerKg)} mol/kg";
 }

@@ -51,22 +51,7 @@ public sealed class Prediction
     public required double PHydrogenConcentration { get; init; }
 
     /// <summary>The pH to two decimals, as a report gives it.</summary>
-    public string Reported
-    {
-        get
-        {
-            // The digits that a record shows are rounded, half away from zero: 1.005 is reported as 1.01, although its double lies below.
-            const double largestDecimal = 1e20;
-            if (!(Math.Abs(PH) < largestDecimal))
-            {
-                return NumberText.Shortest(PH);
-            }
-
-            var shown = decimal.Parse(NumberText.Shortest(PH), NumberStyles.Float, CultureInfo.InvariantCulture);
-            var rounded = Math.Round(shown, 2, MidpointRounding.AwayFromZero);
-            return (rounded == 0 ? 0m : rounded).ToString("F2", CultureInfo.InvariantCulture);
-        }
-    }
+    public string Reported => Report(PH);
 
     /// <summary>The ionic strength, in mol/kg.</summary>
     public double IonicStrengthMolPerKg => _answer.Speciation.IonicStrengthMolPerKg;
@@ -75,8 +60,8 @@ public sealed class Prediction
     public Molality IonicStrength => Molality.FromMolesPerKilogram(IonicStrengthMolPerKg);
 
     /// <summary>
-    /// Buffer capacity, dilution value and temperature coefficient; <see langword="null"/> where the equilibrium has no exact answer. Found
-    /// when they are first asked for.
+    /// Buffer capacity, dilution value and temperature coefficient; <see langword="null"/> where the equilibrium has no exact answer, and
+    /// where the model, far beyond its range, gives no capacity above zero. Found when they are first asked for.
     /// </summary>
     public BufferFigures? Buffer => _buffer.Value;
 
@@ -130,4 +115,19 @@ public sealed class Prediction
     /// <returns>Such as <c>pH 2.35</c>; or <c>pH 2.35, of the homogeneous model only: may not dissolve</c>.</returns>
     public override string ToString() =>
         "pH " + Reported + (OutsideTheModel.Count == 0 ? "" : ", of the homogeneous model only: " + string.Join(", ", OutsideTheModel));
+
+    /// <summary>A pH to two decimals.</summary>
+    internal static string Report(double pH)
+    {
+        // The digits that a record shows are rounded, half away from zero: 1.005 is reported as 1.01, although its double lies below.
+        const double largestDecimal = 1e20;
+        if (!(Math.Abs(pH) < largestDecimal))
+        {
+            return NumberText.Shortest(pH);
+        }
+
+        var shown = decimal.Parse(NumberText.Shortest(pH), NumberStyles.Float, CultureInfo.InvariantCulture);
+        var rounded = Math.Round(shown, 2, MidpointRounding.AwayFromZero);
+        return (rounded == 0 ? 0m : rounded).ToString("F2", CultureInfo.InvariantCulture);
+    }
 }

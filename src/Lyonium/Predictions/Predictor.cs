@@ -26,11 +26,12 @@ public sealed class Predictor
     /// <param name="method">The method; <see langword="null"/> for the exact one.</param>
     /// <param name="activityModel">The model of activity coefficients; <see langword="null"/> for <see cref="ActivityModels.Default"/>.</param>
     /// <exception cref="ArgumentNullException"><paramref name="table"/> is <see langword="null"/>.</exception>
+    /// <exception cref="ArgumentException">A method or model of a host's own has the name of one of the library.</exception>
     public Predictor(SubstanceTable table, ISolver? method = null, IActivityModel? activityModel = null)
     {
         Table = table ?? throw new ArgumentNullException(nameof(table));
-        Method = method ?? new ExactSolver();
-        ActivityModel = activityModel ?? ActivityModels.Default;
+        Method = PluginName.Checked(method ?? new ExactSolver(), nameof(method));
+        ActivityModel = PluginName.Checked(activityModel ?? ActivityModels.Default, nameof(activityModel));
     }
 
     /// <summary>The table of substances.</summary>
@@ -57,11 +58,15 @@ public sealed class Predictor
     /// <summary>The same predictor with another method.</summary>
     /// <param name="method">The method.</param>
     /// <returns>A new predictor.</returns>
+    /// <exception cref="ArgumentNullException">It is <see langword="null"/>.</exception>
+    /// <exception cref="ArgumentException">One of a host's own has the name of one of the library.</exception>
     public Predictor With(ISolver method) => new(Table, method ?? throw new ArgumentNullException(nameof(method)), ActivityModel) { PairSets = PairSets };
 
     /// <summary>The same predictor with another model of activity coefficients.</summary>
     /// <param name="activityModel">The model.</param>
     /// <returns>A new predictor.</returns>
+    /// <exception cref="ArgumentNullException">It is <see langword="null"/>.</exception>
+    /// <exception cref="ArgumentException">One of a host's own has the name of one of the library.</exception>
     public Predictor With(IActivityModel activityModel) =>
         new(Table, Method, activityModel ?? throw new ArgumentNullException(nameof(activityModel))) { PairSets = PairSets };
 
@@ -101,13 +106,21 @@ public sealed class Predictor
             return new Attempt<Prediction>(solved.Faults);
         }
 
-        var answer = solved.Value;
-        var assumptions = new AssumptionList(answer, this, WaterErrorInPH(mixture, answer), IonSizeErrorInPH(mixture, answer)).ToList();
-        return new Attempt<Prediction>(Describe(answer, assumptions));
+        try
+        {
+            var answer = solved.Value;
+            var assumptions = new AssumptionList(answer, this, WaterErrorInPH(mixture, answer), IonSizeErrorInPH(mixture, answer)).ToList();
+            return new Attempt<Prediction>(Describe(answer, assumptions));
+        }
+        catch (Exception e) when (e is not OutOfMemoryException)
+        {
+            // The model is asked for its range, name and source again.
+            return new Attempt<Prediction>(SolvedMixture.Failed(e, Method, ActivityModel).Faults);
+        }
     }
 
     /// <summary>Predicts a recipe with every method of the library side by side, and with this predictor's own.</summary>
-    /// <remarks>A name stands once: the row <c>exact</c> is the library's, and any other name this predictor's own where it has that name.</remarks>
+    /// <remarks>A name stands once, and the row <c>exact</c> stands first.</remarks>
     /// <param name="recipe">The recipe.</param>
     /// <param name="tolerance">How far from the exact answer still counts as right, in pH, above 0.</param>
     /// <returns>The comparison, or every fault of the recipe.</returns>
@@ -133,12 +146,12 @@ public sealed class Predictor
         }
 
         var others = Methods.All.Append(Method)
-            .GroupBy(method => method.Name, StringComparer.Ordinal)
+            .GroupBy(PluginName.Of, StringComparer.Ordinal)
             .Select(group => group.Last())
-            .Where(method => !string.Equals(method.Name, exact.Value.Method, StringComparison.Ordinal))
-            .Select(method => ComparisonRow.Of(method.Name, With(method).TryPredict(mixture.Value), exact.Value, tolerance));
+            .Where(method => !string.Equals(PluginName.Of(method), exact.Value.Method, StringComparison.Ordinal))
+            .Select(method => ComparisonRow.Of(PluginName.Of(method), With(method).TryPredict(mixture.Value), exact.Value, tolerance));
         var rows = others.Prepend(ComparisonRow.Of(exact.Value.Method, exact, exact.Value, tolerance)).ToArray();
-        return new Attempt<Comparison>(new Comparison(recipe, ActivityModel.Name, tolerance, rows));
+        return new Attempt<Comparison>(new Comparison(recipe, exact.Value.ActivityModel, tolerance, rows));
     }
 
     private Attempt<SolvedMixture> TrySolve(Mixture mixture) => SolvedMixture.TrySolve(mixture, PairSets, Method, ActivityModel);

@@ -5,6 +5,7 @@ using Lyonium.Equilibria;
 using Lyonium.Faults;
 using Lyonium.Modelling;
 using Lyonium.Recipes;
+using Lyonium.Solvers;
 
 namespace Lyonium.Predictions;
 
@@ -33,6 +34,11 @@ internal sealed class SolvedMixture
     {
         try
         {
+            if (WhatIsNotNamed(method, model) is { } unnamed)
+            {
+                return Refuse(FaultKinds.MethodFailed, unnamed, method, model);
+            }
+
             var attempt = doorway.Run();
             if (!attempt.Success)
             {
@@ -40,10 +46,20 @@ internal sealed class SolvedMixture
             }
 
             var modelled = attempt.Value;
-            var outcome = method.Solve(modelled.Equilibrium, model);
+            var outcome = Copied(method.Solve(modelled.Equilibrium, model));
+            if (outcome.Status == SolverStatus.None)
+            {
+                return Refuse(FaultKinds.MethodFailed, "it gave no outcome", method, model);
+            }
+
             if (outcome.Status != SolverStatus.Solved)
             {
                 return Refuse(KindOf(outcome.Status), outcome.Reason ?? "no reason was given", method, model, outcome.Iterates);
+            }
+
+            if (WhatIsNoAssumption(outcome, modelled) is { } wrong)
+            {
+                return Refuse(FaultKinds.MethodFailed, wrong, method, model);
             }
 
             if (double.IsNaN(outcome.PH) || double.IsInfinity(outcome.PH))
@@ -64,9 +80,13 @@ internal sealed class SolvedMixture
         catch (Exception e) when (e is not OutOfMemoryException)
         {
             // A plug-in is other people's code: whatever it throws is its fault, told by its name.
-            return Refuse(FaultKinds.MethodFailed, e.GetType().Name + ": " + e.Message, method, model);
+            return Failed(e, method, model);
         }
     }
+
+    /// <summary>The fault of a plug-in that threw.</summary>
+    public static Attempt<SolvedMixture> Failed(Exception e, ISolver method, IActivityModel model) =>
+        Refuse(FaultKinds.MethodFailed, e.GetType().Name + ": " + e.Message, method, model);
 
     /// <summary>Every species of the answer.</summary>
     public IReadOnlyList<PredictedSpecies> Species()
@@ -117,11 +137,34 @@ internal sealed class SolvedMixture
             .ToArray();
     }
 
+    // A record pins the method and the model by their names, and gives the model's source.
+    private static string? WhatIsNotNamed(ISolver method, IActivityModel model) =>
+        string.IsNullOrWhiteSpace(method.Name) ? "the method has no name"
+        : string.IsNullOrWhiteSpace(model.Name) ? "the activity model has no name"
+        : string.IsNullOrWhiteSpace(model.Source) ? "the activity model names no source"
+        : null;
+
+    // A list of other people's may change, or throw when it is read.
+    private static SolverOutcome Copied(SolverOutcome outcome) => outcome with
+    {
+        Assumptions = outcome.Assumptions.ToArray(),
+        Iterates = outcome.Iterates.Select(one => one ?? throw new InvalidOperationException("an estimate is null")).ToArray(),
+    };
+
+    private static string? WhatIsNoAssumption(SolverOutcome outcome, ModelledMixture modelled) => outcome.Assumptions
+        .Select(one =>
+            one is null ? "an assumption is null"
+            : string.IsNullOrWhiteSpace(one.Code) || string.IsNullOrWhiteSpace(one.Basis) ? "an assumption has no code or no basis"
+            : one.Component >= modelled.Families.Count ? FormattableString.Invariant($"an assumption is about component {one.Component}, and there are {modelled.Families.Count}")
+            : null)
+        .FirstOrDefault(one => one is not null);
+
     // An answer whose coefficients or hydrogen ion overflow cannot be written down, whatever its pH.
     private static bool IsRepresentable(Speciation speciation)
     {
         const double largestLog10 = 300;
         return speciation.MolalitiesMolPerKg[Equilibrium.HydrogenIon] > 0
+            && !double.IsInfinity(speciation.IonicStrengthMolPerKg)
             && speciation.Log10Gammas.All(one => Math.Abs(one) < largestLog10)
             && speciation.MolalitiesMolPerKg.All(one => !double.IsNaN(one) && !double.IsInfinity(one));
     }
@@ -134,10 +177,14 @@ internal sealed class SolvedMixture
         _ => FaultKinds.DidNotSettle,
     };
 
+    private static string SuggestionTo(ISolver method) =>
+        method is ExactSolver ? "dilute, or use another activity model" : "use the method 'exact' within the range of the activity model";
+
     private static Attempt<SolvedMixture> Refuse(
         FaultKind kind, string found, ISolver method, IActivityModel model, IReadOnlyList<Iterate>? iterates = null)
     {
-        var fault = Fault.Of(kind, "$", found, ("method", method.Name), ("model", model.Name));
+        var fault = Fault.Of(
+            kind, "$", found, ("method", PluginName.Of(method)), ("model", PluginName.Of(model)), ("suggestion", SuggestionTo(method)));
         return new Attempt<SolvedMixture>([fault.WithIterates((iterates ?? []).Select(one => (one.PH, one.Correction)).ToArray())]);
     }
 }

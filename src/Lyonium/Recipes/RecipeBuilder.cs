@@ -174,6 +174,10 @@ public sealed class RecipeBuilder
     /// <exception cref="LyoniumException">Something is refused; every fault is listed.</exception>
     public Recipe Build(SubstanceTable table) => TryBuild(table).GetValueOrThrow();
 
+    /// <summary>Builds the recipe, with substances of the built-in table, or tells every fault as a value.</summary>
+    /// <returns>The recipe, or every fault.</returns>
+    public Attempt<Recipe> TryBuild() => TryBuild(SubstanceTable.Default);
+
     /// <summary>Builds the recipe, or tells every fault as a value.</summary>
     /// <param name="table">The table whose substances it names.</param>
     /// <returns>The recipe, or every fault.</returns>

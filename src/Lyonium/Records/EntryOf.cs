@@ -7,9 +7,9 @@ namespace Lyonium.Records;
 internal static class EntryOf
 {
     public static AssumptionEntry Assumption(Assumption one) =>
-        new(one.Code, one.Of, Finite(one.Figure), one.Limit, one.Held, one.Basis);
+        new(one.Code, one.Of, Finite(one.Figure), Finite(one.Limit), one.Held, one.Basis);
 
-    public static IterateEntry Iterate(Iterate one) => new(one.PH, one.Correction);
+    public static IterateEntry Iterate(Iterate one) => new(Finite(one.PH), Finite(one.Correction));
 
     /// <summary>JSON has no NaN and no infinity; what is neither stands, the rest is left out.</summary>
     public static double? Finite(double? value) =>

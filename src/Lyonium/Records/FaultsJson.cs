@@ -20,7 +20,7 @@ public static class FaultsJson
         var document = new FaultsDocument(
             "lyonium-faults/1",
             faults.Select(one => new FaultEntry(one.Code, one.Path, one.Found, one.Message, one.Remedy)).ToArray(),
-            faults.FirstOrDefault(one => one.Iterates.Count > 0)?.Iterates.Select(one => new IterateEntry(one.PH, one.Correction)).ToArray());
+            faults.FirstOrDefault(one => one.Iterates.Count > 0)?.Iterates.Select(one => new IterateEntry(EntryOf.Finite(one.PH), EntryOf.Finite(one.Correction))).ToArray());
         return JsonSerializer.Serialize(document, ContractJson.Context.FaultsDocument);
     }
 }

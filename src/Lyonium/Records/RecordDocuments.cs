@@ -15,7 +15,7 @@ internal sealed record SpeciesEntry(
 
 internal sealed record AssumptionEntry(string Code, string Of, double? Figure, double? Limit, bool Held, string Basis);
 
-internal sealed record IterateEntry([property: JsonPropertyName("pH")] double PH, double Correction);
+internal sealed record IterateEntry([property: JsonPropertyName("pH")] double? PH, double? Correction);
 
 internal sealed record CautionEntry(
     string Code, IReadOnlyList<string> Hazard, IReadOnlyList<string>? HazardEu, string Text, IReadOnlyList<string> Because);
@@ -34,13 +34,13 @@ internal sealed record EvidenceEntry(
     IReadOnlyList<ConstantEntry> Constants,
     IReadOnlyList<double>? Bracket,
     int Evaluations,
-    double Residual,
+    double? Residual,
     double? InputResolution);
 
 internal sealed record BufferEntry(
     NumberWithUnit Capacity,
     [property: JsonIgnore(Condition = JsonIgnoreCondition.Never)] double? DilutionValue,
-       [property: JsonIgnore(Condition = JsonIgnoreCondition.Never)] NumberWithUnit? TemperatureCoefficient,
+    [property: JsonIgnore(Condition = JsonIgnoreCondition.Never)] NumberWithUnit? TemperatureCoefficient,
     IReadOnlyList<string>? TemperatureCoefficientLeavesOut);
 
 internal sealed record BandEntry(double Low, double High, string Unit);

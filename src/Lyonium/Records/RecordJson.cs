@@ -53,7 +53,7 @@ public static class RecordJson
     private static BufferEntry Describe(BufferFigures one) => new(
         new NumberWithUnit(one.CapacityMolPerL, "mol/L"),
         EntryOf.Finite(one.DilutionValue),
-        double.IsNaN(one.TemperatureCoefficientPerK) ? null : new NumberWithUnit(one.TemperatureCoefficientPerK, "K-1"),
+        EntryOf.Finite(one.TemperatureCoefficientPerK) is double coefficient ? new NumberWithUnit(coefficient, "K-1") : null,
         one.TemperatureCoefficientLeavesOut.Count == 0 ? null : one.TemperatureCoefficientLeavesOut);
 
     private static ModelUncertaintyEntry Describe(ModelUncertainty one) =>
@@ -92,9 +92,9 @@ public static class RecordJson
             evidence.Table.Sha256,
             evidence.Table.Layers.Select(one => new LayerEntry(one.Name, one.Edition, one.Sha256)).ToArray()),
         evidence.Constants.Select(Describe).ToArray(),
-        double.IsNaN(evidence.BracketLow) ? null : new List<double> { evidence.BracketLow, evidence.BracketHigh },
+        EntryOf.Finite(evidence.BracketLow) is double low && EntryOf.Finite(evidence.BracketHigh) is double high ? new List<double> { low, high } : null,
         evidence.Evaluations,
-        evidence.Residual,
+        EntryOf.Finite(evidence.Residual),
         EntryOf.Finite(evidence.InputResolution));
 
     private static ConstantEntry Describe(UsedConstant one) => new(

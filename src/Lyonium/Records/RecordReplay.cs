@@ -13,7 +13,9 @@ namespace Lyonium.Records;
 
 /// <summary>Replays records: predicts their recipe again, and says what is the same and what differs.</summary>
 /// <remarks>
-/// On the build and processor architecture that made the record the answer is bit-identical; elsewhere it is within 1e-9 in pH.
+/// Every field of the record is compared with what is written for its recipe now. On the build and processor architecture that made the
+/// record all of it is the same, to the last bit; elsewhere a pH is within 1e-9, a molality within 1e-7 and any other figure within 1e-6 of
+/// itself, and how often the balance was evaluated, the bracket, what is left of the balance and the input resolution may be others.
 /// Immutable and thread-safe.
 /// </remarks>
 public sealed class RecordReplay
@@ -34,11 +36,12 @@ public sealed class RecordReplay
     /// <param name="methods">The methods that records may name.</param>
     /// <param name="models">The models of activity coefficients that records may name.</param>
     /// <exception cref="ArgumentNullException">A parameter is <see langword="null"/>.</exception>
+    /// <exception cref="ArgumentException">A method or model of a host's own has the name of one of the library.</exception>
     public RecordReplay(SubstanceTable table, IReadOnlyList<ISolver> methods, IReadOnlyList<IActivityModel> models)
     {
         _table = table ?? throw new ArgumentNullException(nameof(table));
-        _methods = methods ?? throw new ArgumentNullException(nameof(methods));
-        _models = models ?? throw new ArgumentNullException(nameof(models));
+        _methods = (methods ?? throw new ArgumentNullException(nameof(methods))).Select(one => PluginName.Checked(one, nameof(methods))).ToArray();
+        _models = (models ?? throw new ArgumentNullException(nameof(models))).Select(one => PluginName.Checked(one, nameof(models))).ToArray();
     }
 
     /// <summary>Replays a record.</summary>
@@ -59,8 +62,8 @@ public sealed class RecordReplay
         }
 
         var record = new RecordReader(root, version);
-        var method = Find(_methods, one => one.Name, record.Method, root.Path + ".method", faults);
-        var model = Find(_models, one => one.Name, record.ActivityModel, root.Path + ".activityModel", faults);
+        var method = Find(_methods, PluginName.Of, record.Method, root.Path + ".method", faults);
+        var model = Find(_models, PluginName.Of, record.ActivityModel, root.Path + ".activityModel", faults);
         var recipe = record.ReadRecipe(_table);
         if (faults.Any || recipe is null || method is null || model is null)
         {

@@ -7,11 +7,11 @@ namespace Lyonium.Records;
 /// <remarks>Immutable; safe to share between threads.</remarks>
 /// <param name="IsBitIdentical">Whether the pH is the same double.</param>
 /// <param name="IsSameBuild">Whether version, target and processor architecture are those that made the record.</param>
-/// <param name="Differences">What differs beyond the bound, in the order of the record; empty where everything agrees.</param>
+/// <param name="Differences">What differs beyond the bound, is missing or is too much, in the order of the record, the first thousand; empty where everything agrees.</param>
 /// <param name="Prediction">The new prediction.</param>
 public sealed record ReplayReport(
     bool IsBitIdentical, bool IsSameBuild, IReadOnlyList<ReplayDifference> Differences, Prediction Prediction)
 {
-    /// <summary>Whether the answer and its evidence agree, within the bound.</summary>
+    /// <summary>Whether the record agrees, field by field and within the bounds; who made it is told by <see cref="IsSameBuild"/>.</summary>
     public bool Agrees => Differences.Count == 0;
 }

@@ -75,4 +75,7 @@ public sealed record DissociationStep
             + (heatCapacity / GasConstant * ((from / temperatureK) - 1 + Math.Log(temperatureK / from)));
         return -lnK / Math.Log(10);
     }
+
+    /// <summary>The pKa at another temperature, at the ionic strength at which it was published.</summary>
+    internal double PKaAt(double temperatureK) => PKa.Value + ShiftTo(temperatureK);
 }

@@ -13,7 +13,8 @@ namespace Lyonium.Substances;
 internal sealed class FamilyReader(SourcedValueReader values, string version)
 {
     private static readonly string[] FormProperties = ["formula", "solubility"];
-    private static readonly string[] LaterFormProperties = [.. FormProperties, "ionSize"];
+    private static readonly string[] LaterFormProperties = ["ionSize"];
+    private const double ZeroCelsiusK = 273.15;
     private readonly StepReader _steps = new(values, version);
 
     public IReadOnlyList<Family> Read(JsonPlace? list)
@@ -27,13 +28,15 @@ internal sealed class FamilyReader(SourcedValueReader values, string version)
                 continue;
             }
 
-            if (ids.Add(family.Id))
+            // The ions of water are the species water:0 and water:2.
+            var owner = family.Id == "water" ? "the ions of water" : ids.Add(family.Id) ? null : "another family";
+            if (owner is null)
             {
                 families.Add(family);
             }
             else
             {
-                place.Faults.Add(FaultKinds.TableDuplicate, place.Path + ".id", family.Id, ("owner", family.Id == "water" ? "the ions of water" : "another family"));
+                place.Faults.Add(FaultKinds.TableDuplicate, place.Path + ".id", family.Id, ("owner", owner));
             }
         }
 
@@ -76,9 +79,9 @@ internal sealed class FamilyReader(SourcedValueReader values, string version)
 
     private (ChemicalFormula? Formula, SourcedValue? Solubility, SourcedValue? IonSize) ReadForm(JsonPlace place)
     {
-        var properties = place.Properties(string.Equals(version, "1", StringComparison.Ordinal) ? FormProperties : LaterFormProperties);
+        var properties = TableVersion.Properties(place, version, FormProperties, LaterFormProperties);
         var solubility = values.ReadPositive(properties, "solubility");
-        var ionSize = values.ReadPositive(properties, "ionSize");
+        var ionSize = values.ReadPositive(properties, "ionSize", most: 20);
         if (place.Need(properties, "formula") is not { } formulaPlace || formulaPlace.Text() is not { } text)
         {
             return (null, solubility, ionSize);
@@ -121,18 +124,47 @@ internal sealed class FamilyReader(SourcedValueReader values, string version)
     {
         for (var i = 1; i < steps.Length; i++)
         {
-            var before = steps[i - 1]!.PKa.Value;
-            var value = steps[i]!.PKa.Value;
-            if (!(value > before))
+            var (before, step) = (steps[i - 1]!, steps[i]!);
+            if (!(step.PKa.Value > before.PKa.Value))
             {
-                places[i].Faults.Add(
-                    FaultKinds.TableStepOutOfOrder,
-                    places[i].Path + ".pKa",
-                    NumberText.Shortest(value),
-                    ("step", (i + 1).ToString(CultureInfo.InvariantCulture)),
-                    ("family", id),
-                    ("before", NumberText.Shortest(before)));
+                RefuseOrder(places[i], ".pKa", id, i, NumberText.Shortest(step.PKa.Value), before.PKa.Value);
+            }
+            else if (FirstEndOutOfOrder(before, step) is double temperatureK)
+            {
+                var celsius = NumberText.Shortest(Math.Round(temperatureK - ZeroCelsiusK, 2));
+                RefuseOrder(places[i], "", id, i, Rounded(step.PKaAt(temperatureK)) + " at " + celsius + " Cel", before.PKaAt(temperatureK));
             }
         }
     }
+
+    // What a step is carried to may overtake its neighbour; a step that is carried nowhere holds at every temperature.
+    private static double? FirstEndOutOfOrder(DissociationStep before, DissociationStep step)
+    {
+        var low = Math.Max(before.ValidRange?.LowK ?? 0, step.ValidRange?.LowK ?? 0);
+        var high = Math.Min(before.ValidRange?.HighK ?? double.PositiveInfinity, step.ValidRange?.HighK ?? double.PositiveInfinity);
+        if (double.IsInfinity(high) || low > high)
+        {
+            return null;
+        }
+
+        foreach (var temperatureK in new[] { low, high })
+        {
+            if (!(step.PKaAt(temperatureK) > before.PKaAt(temperatureK)))
+            {
+                return temperatureK;
+            }
+        }
+
+        return null;
+    }
+
+    private static string Rounded(double pKa) => double.IsInfinity(pKa) || double.IsNaN(pKa) ? "no number" : NumberText.Shortest(Math.Round(pKa, 4));
+
+    private static void RefuseOrder(JsonPlace place, string below, string id, int index, string found, double before) => place.Faults.Add(
+        FaultKinds.TableStepOutOfOrder,
+        place.Path + below,
+        found,
+        ("step", (index + 1).ToString(CultureInfo.InvariantCulture)),
+        ("family", id),
+        ("before", Rounded(before)));
 }

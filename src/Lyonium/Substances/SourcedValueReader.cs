@@ -12,6 +12,8 @@ namespace Lyonium.Substances;
 internal sealed class SourcedValueReader
 {
     private const double ZeroCelsius = 273.15;
+    private const double LowestCelsius = 0;
+    private const double HighestCelsius = 100;
     private readonly Dictionary<string, Source> _byKey;
 
     public SourcedValueReader(IReadOnlyList<Source> sources)
@@ -35,20 +37,22 @@ internal sealed class SourcedValueReader
         return Finish(place, properties, place.Need(properties, "value"), "standardUncertainty");
     }
 
-    /// <summary>Reads an optional value that is above zero.</summary>
-    public SourcedValue? ReadPositive(IReadOnlyDictionary<string, JsonPlace> properties, string name)
+    /// <summary>Reads an optional value that is above zero and not above a limit.</summary>
+    public SourcedValue? ReadPositive(IReadOnlyDictionary<string, JsonPlace> properties, string name, double most = double.PositiveInfinity)
     {
         if (!properties.TryGetValue(name, out var place) || Read(place) is not { } value)
         {
             return null;
         }
 
-        if (value.Value > 0)
+        if (value.Value > 0 && value.Value <= most)
         {
             return value;
         }
 
-        place.Faults.Add(FaultKinds.TableBadValue, place.Path, NumberText.Shortest(value.Value), ("detail", $"a {name} is above zero"));
+        var article = "aeiou".IndexOf(name[0]) < 0 ? "a" : "an";
+        var limit = value.Value > 0 ? "at most " + NumberText.Shortest(most) : "above zero";
+        place.Faults.Add(FaultKinds.TableBadValue, place.Path, NumberText.Shortest(value.Value), ("detail", $"{article} {name} is {limit}"));
         return null;
     }
 
@@ -62,9 +66,16 @@ internal sealed class SourcedValueReader
         var uncertainty = Optional(properties, uncertaintyName);
         var celsius = Optional(properties, "temperatureCelsius");
         var ionicStrength = Optional(properties, "ionicStrength") ?? 0;
-        if (uncertainty < 0 || ionicStrength < 0)
+        var isSound = Holds(!(ionicStrength < 0), place, ".ionicStrength", ionicStrength, "an ionic strength is not below zero")
+            & Holds(!(celsius < LowestCelsius) && !(celsius > HighestCelsius), place, ".temperatureCelsius", celsius, "a temperature lies within 0 to 100 Cel")
+            & Holds(
+                uncertaintyName == "standardUncertainty" ? !(uncertainty <= 0) : !(uncertainty < 0),
+                place,
+                "." + uncertaintyName,
+                uncertainty,
+                uncertaintyName == "standardUncertainty" ? "a standard uncertainty is above zero; leave it out where it is not known" : "an uncertainty is not below zero");
+        if (!isSound)
         {
-            place.Faults.Add(FaultKinds.TableBadValue, place.Path, "", ("detail", "an uncertainty or ionic strength is not below zero"));
             return null;
         }
 
@@ -80,6 +91,16 @@ internal sealed class SourcedValueReader
             IonicStrengthMolPerKg = ionicStrength,
             Note = properties.TryGetValue("note", out var note) ? note.Text() ?? "" : "",
         };
+    }
+
+    private static bool Holds(bool isSound, JsonPlace place, string below, double? found, string detail)
+    {
+        if (!isSound)
+        {
+            place.Faults.Add(FaultKinds.TableBadValue, place.Path + below, NumberText.Shortest(found ?? double.NaN), ("detail", detail));
+        }
+
+        return isSound;
     }
 
     private static double? Optional(IReadOnlyDictionary<string, JsonPlace> properties, string name) =>

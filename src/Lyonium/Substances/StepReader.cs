@@ -13,27 +13,27 @@ namespace Lyonium.Substances;
 internal sealed class StepReader(SourcedValueReader values, string version)
 {
     private static readonly string[] Properties = ["pKa", "enthalpy", "heatCapacity", "alternatives", "reason"];
-    private static readonly string[] LaterProperties = [.. Properties, "equation", "validCelsius"];
+    private static readonly string[] LaterProperties = ["equation", "validCelsius"];
 
     public DissociationStep? Read(JsonPlace place, string family, int number)
     {
-        var properties = place.Properties(string.Equals(version, "1", StringComparison.Ordinal) ? Properties : LaterProperties);
-        var pKa = values.Read(place.Need(properties, "pKa"));
-        var alternatives = (properties.TryGetValue("alternatives", out var others) ? others.Items() : []).Select(values.Read).OfType<SourcedValue>().ToArray();
+        var properties = TableVersion.Properties(place, version, Properties, LaterProperties);
+        var pKa = ReadPKa(place.Need(properties, "pKa"));
+        var alternatives = (properties.TryGetValue("alternatives", out var others) ? others.Items() : []).Select(ReadPKa).OfType<SourcedValue>().ToArray();
         var reason = properties.TryGetValue("reason", out var why) ? why.Text() ?? "" : "";
         if (alternatives.Length > 0 && reason.Length == 0)
         {
             place.Faults.Add(FaultKinds.MissingProperty, place.Path, "", ("property", "reason"));
         }
 
+        if (why is not null && others is not { ItemCount: > 0 })
+        {
+            Refuse(place, ".reason", reason, "a reason says why the pKa was chosen, and stands beside \"alternatives\"");
+        }
+
         if (pKa is null)
         {
             return null;
-        }
-
-        if (Math.Abs(pKa.Value) > 50)
-        {
-            Refuse(place, ".pKa", NumberText.Shortest(pKa.Value), "a pKa lies between -50 and 50");
         }
 
         var step = new DissociationStep
@@ -48,7 +48,21 @@ internal sealed class StepReader(SourcedValueReader values, string version)
             Reason = reason,
         };
         Check(place, step);
-        return step with { ValidRange = RangeOf(step, properties) };
+        step = step with { ValidRange = RangeOf(step, properties) };
+        CheckRange(place, step, properties);
+        return step;
+    }
+
+    private SourcedValue? ReadPKa(JsonPlace? place)
+    {
+        const double lowest = -20, highest = 40;
+        var pKa = values.Read(place);
+        if (pKa is not null && !(pKa.Value >= lowest && pKa.Value <= highest))
+        {
+            Refuse(place!, "", NumberText.Shortest(pKa.Value), "a pKa lies within -20 to 40");
+        }
+
+        return pKa;
     }
 
     private PKaEquation? ReadEquation(JsonPlace place)
@@ -122,6 +136,43 @@ internal sealed class StepReader(SourcedValueReader values, string version)
                 place, ".equation", NumberText.Shortest(equation.At(step.PublishedAtK)), "the equation gives the pKa at its temperature within 0.02");
         }
     }
+
+    // A range that is stated is one of a course, and the constant itself lies in it; to its ends the course gives a pKa.
+    private static void CheckRange(JsonPlace place, DissociationStep step, IReadOnlyDictionary<string, JsonPlace> properties)
+    {
+        if (step.ValidRange is not { } range)
+        {
+            return;
+        }
+
+        if (!properties.ContainsKey("equation") && !properties.ContainsKey("enthalpy"))
+        {
+            Refuse(place, ".validCelsius", Celsius(range.LowK) + " to " + Celsius(range.HighK), "a range stands beside an equation or an enthalpy");
+            return;
+        }
+
+        const double rounding = 1e-9;
+        if (properties.ContainsKey("validCelsius") && range.Beyond(step.PublishedAtK) > rounding)
+        {
+            Refuse(
+                place,
+                ".validCelsius",
+                Celsius(range.LowK) + " to " + Celsius(range.HighK),
+                $"it does not hold {Celsius(step.PublishedAtK)} Cel, the temperature of the pKa");
+        }
+
+        const double most = 50;
+        foreach (var temperatureK in new[] { range.LowK, range.HighK }.Where(temperatureK => !(Math.Abs(step.PKaAt(temperatureK)) <= most)))
+        {
+            Refuse(
+                place,
+                step.Equation is null ? ".enthalpy" : ".equation",
+                NumberText.Shortest(step.PKaAt(temperatureK)),
+                $"the pKa at {Celsius(temperatureK)} Cel lies within -50 to 50");
+        }
+    }
+
+    private static string Celsius(double temperatureK) => NumberText.Shortest(Math.Round(temperatureK - 273.15, 2));
 
     private static void Refuse(JsonPlace place, string below, string found, string detail) =>
         place.Faults.Add(FaultKinds.TableBadValue, place.Path + below, found, ("detail", detail));

@@ -15,7 +15,7 @@ internal static class SubstanceTableReader
     private const string Resource = "Lyonium.Data.table.json";
 
     private static readonly string[] Sections = ["format", "edition", "sources", "elements", "families", "substances"];
-    private static readonly string[] LaterSections = [.. Sections, "interactions", "pairSets"];
+    private static readonly string[] LaterSections = ["interactions", "pairSets"];
 
     public static SubstanceTable ReadEmbedded()
     {
@@ -90,12 +90,12 @@ internal static class SubstanceTableReader
     {
         using var bytes = new MemoryStream();
         var root = JsonDocumentReader.Open(stream, MostBytes, faults, bytes);
-        if (root is null || DocumentFormat.VersionOf(root, "lyonium-table", "1", "1.1") is not { } version)
+        if (root is null || DocumentFormat.VersionOf(root, TableVersion.FormatName, TableVersion.First, TableVersion.Latest) is not { } version)
         {
             return null;
         }
 
-        var properties = root.Properties(string.Equals(version, "1", StringComparison.Ordinal) ? Sections : LaterSections);
+        var properties = TableVersion.Properties(root, version, Sections, LaterSections);
         return (root, properties, version, TableText.Read(root, properties, "edition"), Fingerprint.Of(bytes.ToArray()));
     }
 

@@ -166,7 +166,7 @@ public sealed class BufferFiguresTests
 
     private sealed class FailsAwayFrom25 : IActivityModel
     {
-        public string Name => "davies";
+        public string Name => "only at 25 Cel";
 
         public double HighestIonicStrengthMolPerKg => 1;
 

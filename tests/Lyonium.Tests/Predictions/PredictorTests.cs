@@ -102,7 +102,19 @@ public sealed class PredictorTests
 
         Assert.Equal(pH, prediction.PH);
         Assert.Equal(reported, prediction.Reported);
-        Assert.Equal("pH " + reported, prediction.ToString());
+        Assert.StartsWith("pH " + reported, prediction.ToString(), StringComparison.Ordinal);
+    }
+
+    // 20 mol/kg of a trivalent salt with the Davies equation, which is stated to 0.5 mol/kg: a number, and no clean one.
+    [Fact]
+    public void Predict_farBeyondTheModel_saysSoInTheFirstLine()
+    {
+        var predictor = new Predictor().With(new DaviesModel());
+        var prediction = predictor.Predict(RecipeJson.Read(RecipeText.With("{ \"substance\": \"tripotassium phosphate\", \"amount\": \"20 mol\" }, " + Kilogram)));
+
+        Assert.Contains("ionic strength far beyond the activity model", prediction.OutsideTheModel);
+        Assert.Contains("far beyond", prediction.ToString(), StringComparison.Ordinal);
+        Assert.Null(prediction.ModelUncertainty);
     }
 
     [Theory]

@@ -38,7 +38,7 @@ public sealed class SolubilityTests
         var prediction = new Predictor().Predict(Water().Weigh(mass, substance).Build());
 
         var check = prediction.Assumptions.Where(one => one.Code == Code).ToArray();
-        Assert.Equal(told ? ["may not dissolve"] : [], prediction.OutsideTheModel);
+        Assert.Equal(told, prediction.OutsideTheModel.Contains("may not dissolve"));
         Assert.Equal(told ? 1 : 0, check.Length);
         Assert.All(check, one => Assert.True(one is { Held: false, Limit: 1, Figure: > 1 }, one.ToString()));
         Assert.All(check, one => Assert.StartsWith("may not dissolve: listed solubility ", one.Basis, StringComparison.Ordinal));

@@ -19,6 +19,9 @@ public sealed class CommandLineTests
     [InlineData("predict", "a.json", "--activity", "pitzer")]
     [InlineData("predict", "a.json", "--activity", "Davies")]
     [InlineData("constants", "acetic", "acid")]
+    [InlineData("predict", "-", "--table", "-")]
+    [InlineData("compare", "-", "--table", "-")]
+    [InlineData("qualify", "--method", "guess")]
     public void WrongCommandLine_isStatus2AndSaysWhy(params string[] arguments)
     {
         var run = ToolRun.Of(arguments);
@@ -26,6 +29,33 @@ public sealed class CommandLineTests
         Assert.Equal((2, ""), (run.ExitStatus, run.Output));
         Assert.NotEmpty(run.ErrorLines);
         Assert.Contains("--help", run.ErrorLines[^1], StringComparison.Ordinal);
+    }
+
+    [Theory]
+    [InlineData("predict", "", "--format", "text")]
+    [InlineData("constants", "--table", "")]
+    [InlineData("constants", "--table", " ")]
+    public void NoName_ofAFile_isRefusedInPlainWords(params string[] arguments)
+    {
+        var run = ToolRun.Of(arguments);
+
+        Assert.Equal((1, ""), (run.ExitStatus, run.Output));
+        Assert.StartsWith("LYO0703 at $", Assert.Single(run.ErrorLines), StringComparison.Ordinal);
+        Assert.DoesNotContain("Parameter", run.Errors, StringComparison.Ordinal);
+    }
+
+    // The sum and what fails stand first, every line is within the width, and a short-cut fails the checks of the exact answer.
+    [Fact]
+    public void Qualify_withAShortCut_fails()
+    {
+        var run = ToolRun.Of("qualify", "--method", "dominant-acid");
+        var lines = run.Output.Split('\n');
+
+        Assert.Equal(3, run.ExitStatus);
+        Assert.Contains(" checks: ", lines[0], StringComparison.Ordinal);
+        Assert.InRange(Array.FindIndex(lines, line => line.StartsWith("FAILS", StringComparison.Ordinal)), 1, 2);
+        Assert.All(lines, line => Assert.InRange(line.TrimEnd('\r').Length, 0, 96));
+        Assert.Contains("  method     dominant-acid", run.Output, StringComparison.Ordinal);
     }
 
     [Fact]
