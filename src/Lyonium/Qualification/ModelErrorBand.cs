@@ -22,7 +22,8 @@ public sealed record ModelErrorBand(double LowMolPerKg, double HighMolPerKg, int
     private const int Fewest = 3;
 
     private const double HighestK = 323.15 + 1e-9;
-    private static readonly double[] Ends = [0, 0.03, 0.075, 0.15, 0.5];
+    // Below 0.075 mol/kg there are few solutions, and what the constants may be off by does not shrink with the ionic strength: one band.
+    private static readonly double[] Ends = [0, 0.075, 0.15, 0.5];
 
     internal static IReadOnlyList<ModelErrorBand> Of(IReadOnlyList<CheckOutcome> outcomes)
     {

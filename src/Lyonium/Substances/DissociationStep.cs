@@ -1,4 +1,3 @@
-using System;
 using System.Collections.Generic;
 using Lyonium.Provenance;
 
@@ -8,9 +7,6 @@ namespace Lyonium.Substances;
 /// <remarks>Immutable; safe to share between threads.</remarks>
 public sealed record DissociationStep
 {
-    private const double StandardK = 298.15;
-    private const double GasConstant = 8.31446261815324; // J/(mol K), CODATA 2018, exact
-
     /// <summary>The id, <c>family:number</c>, such as <c>citrate:1</c>.</summary>
     public required string Id { get; init; }
 
@@ -41,7 +37,7 @@ public sealed record DissociationStep
     public string Reason { get; init; } = "";
 
     /// <summary>The temperature at which <see cref="PKa"/> holds, in K; 25 °C where it does not say.</summary>
-    public double PublishedAtK => PKa.TemperatureK ?? StandardK;
+    public double PublishedAtK => PKa.TemperatureK ?? VantHoff.StandardK;
 
     /// <summary>Whether the table says how the pKa changes with temperature.</summary>
     public bool ChangesWithTemperature => Equation is not null || EnthalpyKJPerMol is not null;
@@ -70,10 +66,8 @@ public sealed record DissociationStep
         }
 
         var heatCapacity = HeatCapacityJPerMolK?.Value ?? 0;
-        var enthalpyJPerMol = (1000 * enthalpy.Value) + (heatCapacity * (from - (enthalpy.TemperatureK ?? StandardK)));
-        var lnK = (-enthalpyJPerMol / GasConstant * ((1 / temperatureK) - (1 / from)))
-            + (heatCapacity / GasConstant * ((from / temperatureK) - 1 + Math.Log(temperatureK / from)));
-        return -lnK / Math.Log(10);
+        var enthalpyJPerMol = (1000 * enthalpy.Value) + (heatCapacity * (from - (enthalpy.TemperatureK ?? VantHoff.StandardK)));
+        return -VantHoff.Log10Shift(enthalpyJPerMol, heatCapacity, from, temperatureK);
     }
 
     /// <summary>The pKa at another temperature, at the ionic strength at which it was published.</summary>

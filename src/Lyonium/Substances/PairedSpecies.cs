@@ -1,4 +1,3 @@
-using System;
 using System.Collections.Generic;
 using Lyonium.Provenance;
 
@@ -8,9 +7,6 @@ namespace Lyonium.Substances;
 /// <remarks>Immutable; safe to share between threads.</remarks>
 public sealed record PairedSpecies
 {
-    private const double StandardK = 298.15;
-    private const double GasConstant = 8.31446261815324; // J/(mol K), CODATA 2018, exact
-
     /// <summary>The id, for ever, such as <c>calcium-hydroxide-pair</c>.</summary>
     public required string Id { get; init; }
 
@@ -35,7 +31,7 @@ public sealed record PairedSpecies
     /// <summary>By how much log10 K differs at another temperature, by the van 't Hoff equation with a constant enthalpy; 0 where none is known.</summary>
     /// <param name="temperatureK">The temperature in K, above 0.</param>
     /// <returns>The difference in log10 K.</returns>
-    public double ShiftTo(double temperatureK) => EnthalpyKJPerMol is not { } enthalpy
-        ? 0
-        : -1000 * enthalpy.Value / GasConstant * ((1 / temperatureK) - (1 / (Log10K.TemperatureK ?? StandardK))) / Math.Log(10);
+    public double ShiftTo(double temperatureK) => EnthalpyKJPerMol is { } enthalpy
+        ? VantHoff.Log10Shift(1000 * enthalpy.Value, heatCapacityJPerMolK: 0, Log10K.TemperatureK ?? VantHoff.StandardK, temperatureK)
+        : 0;
 }
