@@ -1,5 +1,6 @@
 using System;
 using System.Collections.Generic;
+using System.Globalization;
 using System.Linq;
 using Lyonium.Equilibria;
 using Lyonium.Solvers;
@@ -13,7 +14,7 @@ internal sealed class WorkingBuilder(SolvedMixture answer)
 
     public Working Build() => new()
     {
-        Reactions = Reactions().ToArray(),
+        Reactions = Reactions().Concat(Formations()).ToArray(),
         Amounts = Amounts().ToArray(),
         Found = answer.Outcome.Formula ?? "the pH at which the charges of all species add up to zero",
         HydrogenMolPerKg = _speciation.MolalitiesMolPerKg[Equilibrium.HydrogenIon],
@@ -51,6 +52,36 @@ internal sealed class WorkingBuilder(SolvedMixture answer)
         }
     }
 
+    private IEnumerable<WorkedReaction> Formations()
+    {
+        var modelled = answer.Modelled;
+        var index = modelled.Species.Select((one, i) => (one.Id, i)).ToDictionary(one => one.Id, one => one.i, StringComparer.Ordinal);
+        for (var i = 0; i < modelled.Pairs.Count; i++)
+        {
+            var pair = modelled.Pairs[i];
+            var at = modelled.Species.Count - modelled.Pairs.Count + i;
+            var log10K = pair.Log10K.Value + pair.ShiftTo(modelled.Equilibrium.Solvent.TemperatureK);
+            var conditional = log10K - _speciation.Log10Gammas[at];
+            double parts = 1;
+            foreach (var part in pair.FormedFrom)
+            {
+                conditional += part.Value * _speciation.Log10Gammas[index[part.Key]];
+                parts *= Math.Pow(_speciation.MolalitiesMolPerKg[index[part.Key]], part.Value);
+            }
+
+            var display = modelled.Species[at].Display;
+            var terms = pair.FormedFrom.Select(part => (Count: part.Value, modelled.Species[index[part.Key]].Display)).ToArray();
+            yield return new WorkedReaction(
+                pair.Id,
+                string.Join(" + ", terms.Select(one => (one.Count == 1 ? "" : one.Count.ToString(CultureInfo.InvariantCulture) + " ") + one.Display)) + " ⇌ " + display,
+                $"[{display}] / ({string.Concat(terms.Select(one => $"[{one.Display}]" + (one.Count == 1 ? "" : "^" + one.Count.ToString(CultureInfo.InvariantCulture))))})",
+                -log10K,
+                Math.Pow(10, conditional),
+                _speciation.MolalitiesMolPerKg[at] / parts,
+                IsFormation: true);
+        }
+    }
+
     private IEnumerable<WorkedAmount> Amounts()
     {
         var start = Start();
@@ -63,13 +94,16 @@ internal sealed class WorkingBuilder(SolvedMixture answer)
     // Every proton at hand on the highest level that is free; what no level takes is an excess of strong acid or base.
     private double[]? Start()
     {
-        var equilibrium = answer.Modelled.Equilibrium;
+        // Nothing has paired yet.
+        var paired = answer.Modelled.Equilibrium;
+        var single = paired.Species.Count - answer.Modelled.Pairs.Count;
+        var equilibrium = new Equilibrium(paired.Constraints, paired.Species.Take(single).ToArray(), paired.Solvent);
         if (ProtonLevels.Fill(equilibrium, _speciation.Log10Gammas) is not { } levels)
         {
             return null;
         }
 
-        var start = new double[equilibrium.SpeciesCount];
+        var start = new double[paired.SpeciesCount];
         var standing = Standing(equilibrium, levels);
         foreach (var one in standing)
         {

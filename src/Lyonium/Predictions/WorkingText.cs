@@ -17,7 +17,7 @@ internal static class WorkingText
         foreach (var one in working.Reactions)
         {
             Line($"  {one.Id}: {one.Equation}");
-            Line($"    K = {one.MassAction} = {Number(one.K)}   (pKa {Fixed(one.PKa)} at infinite dilution)");
+            Line($"    K = {one.MassAction} = {Number(one.K)}   ({(one.IsFormation ? "log K " + Fixed(-one.PKa) : "pKa " + Fixed(one.PKa))} at infinite dilution)");
         }
 
         Line("");

@@ -51,6 +51,20 @@ public sealed class PairSetTests
         Assert.NotNull(with.Buffer);
     }
 
+    // The worked steps show the pairs' formation, fulfilled by the answer, and start with nothing paired.
+    [Fact]
+    public void Work_showsTheFormationOfPairs()
+    {
+        var working = Of(new Predictor(), Lime).Work();
+        var pair = working.Reactions.Single(one => one.IsFormation && one.Id == "calcium-hydroxide-pair");
+
+        Assert.Equal(("Ca²⁺ + OH⁻ ⇌ CaOH⁺", "[CaOH⁺] / ([Ca²⁺][OH⁻])"), (pair.Equation, pair.MassAction));
+        Assert.Equal(-1.30, pair.PKa, 1e-12);
+        Assert.Equal(1, pair.Quotient / pair.K, 1e-9);
+        Assert.Equal([0.0406, 0.0203, 0], working.Amounts.Skip(1).Select(one => Math.Round(one.StartMolPerKg!.Value, 12)));
+        Assert.Contains("log K 1.3000", working.ToText(), StringComparison.Ordinal);
+    }
+
     [Fact]
     public void WithPairSets_none_hasNoPairs()
     {
