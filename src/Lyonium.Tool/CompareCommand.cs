@@ -13,6 +13,7 @@ internal static class CompareCommand
     {
         var recipe = new Argument<string>("RECIPE") { Description = "a file of lyonium-recipe/1, or - for standard input" };
         var activity = Plugins.ActivityOption();
+        var pairs = PairsOption.Create();
         var tolerance = new Option<double>("--tolerance")
         {
             Description = "how far from the exact answer still counts as right, in pH",
@@ -27,7 +28,7 @@ internal static class CompareCommand
         });
         var table = TableOption.Create();
         var format = OutputFormat.Option();
-        var command = new Command("compare", "Predicts a recipe with every method, beside the exact answer.") { recipe, activity, tolerance, table, format };
+        var command = new Command("compare", "Predicts a recipe with every method, beside the exact answer.") { recipe, activity, pairs, tolerance, table, format };
         TableOption.RefuseBothOnStandardInput(command, recipe, table);
         command.SetAction(parsed =>
         {
@@ -39,7 +40,7 @@ internal static class CompareCommand
             }
 
             var predictor = new Predictor(opened.Value, activityModel: ActivityModels.Find(parsed.GetValue(activity)!));
-            return Run(parsed.GetValue(recipe)!, predictor, parsed.GetValue(tolerance), asJson);
+            return Run(parsed.GetValue(recipe)!, PairsOption.Apply(predictor, parsed.GetValue(pairs)), parsed.GetValue(tolerance), asJson);
         });
         return command;
     }

@@ -3,6 +3,7 @@ using System.CommandLine;
 using Lyonium.Activity;
 using Lyonium.Predictions;
 using Lyonium.Qualification;
+using Lyonium.Recipes;
 using Lyonium.Solvers;
 
 namespace Lyonium.Tool;
@@ -32,7 +33,15 @@ internal static class QualifyCommand
 
             var predictor = new Predictor(
                 opened.Value, Methods.Find(parsed.GetValue(method)!), ActivityModels.Find(parsed.GetValue(activity)!));
-            var report = new Qualifier(PairsOption.Apply(predictor, parsed.GetValue(pairs))).Run();
+            predictor = PairsOption.Apply(predictor, parsed.GetValue(pairs));
+            var water = predictor.TryPredict(Recipe.Named("water").PourWater("1 kg").Build());
+            if (!water.Success)
+            {
+                // What not even water can be predicted with need not be told once for each check.
+                return OutputFormat.Print(water.Faults, asJson);
+            }
+
+            var report = new Qualifier(predictor).Run();
             if (asJson)
             {
                 Console.Out.WriteLine(report.ToJson());

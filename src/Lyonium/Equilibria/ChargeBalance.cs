@@ -18,6 +18,7 @@ namespace Lyonium.Equilibria;
 internal ref struct ChargeBalance
 {
     private const int MostRounds = 200;
+    private const int UndampedRounds = 30;
     private const double FullPrecision = 1e-8; // a Newton step this short leaves an error of its square
     private const double HalfLastDigit = 1.1102230246251565e-16;
 
@@ -27,6 +28,7 @@ internal ref struct ChargeBalance
     private readonly Span<double> _groupWork;
     private double _groupNoise;
     private readonly IActivityModel _model;
+    private readonly bool _dependsOnMolalities;
     private readonly double _ionProduct;
     private readonly Span<double> _ratios;
     private readonly Span<double> _log10Gammas;
@@ -48,6 +50,7 @@ internal ref struct ChargeBalance
         _ladders = equilibrium.Ladders;
         _groups = equilibrium.Groups;
         _model = model;
+        _dependsOnMolalities = (model.Uses & IonData.Interactions) != 0;
         _ionProduct = Math.Pow(10, -equilibrium.Solvent.PKw);
         var species = equilibrium.SpeciesCount;
         var rungs = _ladders.Species.Length;
@@ -155,7 +158,7 @@ internal ref struct ChargeBalance
             var next = Next(round, low, high, miss, lastAt, lastMiss);
             lastAt = _gammasAt;
             lastMiss = miss;
-            change = UseGammasAt(next);
+            change = UseGammasAt(next, isDamped: _dependsOnMolalities && round >= UndampedRounds);
             if (change == 0 && next == IonicStrength)
             {
                 return Settled(0);
@@ -205,11 +208,18 @@ internal ref struct ChargeBalance
         return double.IsInfinity(high) ? 2 * Math.Max(low, IonicStrength) : 0.5 * (low + high);
     }
 
-    private double UseGammasAt(double ionicStrength)
+    // Where the coefficients follow single molalities and go to and fro, half a step brings them to rest. Coefficients that follow the ionic
+    // strength alone have its bracket, and must be those of it.
+    private double UseGammasAt(double ionicStrength, bool isDamped)
     {
         _nextLog10Gammas.Fill(double.NaN); // so that a model that leaves one out is refused
         _model.Log10Gammas(_equilibrium, ionicStrength, _molalities, _nextLog10Gammas);
         _gammasAt = ionicStrength;
+        for (var i = 0; isDamped && i < _log10Gammas.Length; i++)
+        {
+            _nextLog10Gammas[i] = 0.5 * (_nextLog10Gammas[i] + _log10Gammas[i]);
+        }
+
         if (_nextLog10Gammas.SequenceEqual(_log10Gammas))
         {
             return 0;

@@ -184,7 +184,7 @@ public static class FaultKinds
 
     /// <summary>A species made of more than one component.</summary>
     public static FaultKind CoupledSpecies { get; } = new(
-        "LYO0601", "coupled species", "The method '{method}' does not solve {found}: a species over more than one component.", "leave the species out, or use a method that solves coupled equilibria");
+        "LYO0601", "coupled species", "The method '{method}' does not solve {found}: species over more than one component.", "use the method 'exact', or predict without ion pairs");
 
     /// <summary>A component held at a fixed activity.</summary>
     public static FaultKind FixedActivity { get; } = new(

@@ -107,7 +107,7 @@ public sealed class Prediction
     /// <returns>The worked steps.</returns>
     public Working Work() => new WorkingBuilder(_answer).Build();
 
-    private bool HasDefaultPairs => Mixture.Table.PairSets
+    private bool HasDefaultPairs => Mixture.Table.PairSets.All(set => set.Layer is null) && Mixture.Table.PairSets
         .Where(set => set.IsDefault && set.Models.Contains(ActivityModel, StringComparer.Ordinal))
         .Select(set => set.Id).SequenceEqual(PairSets, StringComparer.Ordinal);
 

@@ -77,6 +77,10 @@ internal sealed class SolvedMixture
                 ? new Attempt<SolvedMixture>(new SolvedMixture(modelled, outcome, speciation))
                 : Refuse(FaultKinds.MethodFailed, "activity coefficients are beyond what a number holds", method, model);
         }
+        catch (ArithmeticException e)
+        {
+            return Refuse(FaultKinds.DidNotSettle, e.Message.TrimEnd('.'), method, model);
+        }
         catch (Exception e) when (e is not OutOfMemoryException)
         {
             // A plug-in is other people's code: whatever it throws is its fault, told by its name.

@@ -1,4 +1,5 @@
 using System;
+using System.Collections.Generic;
 using System.Globalization;
 using System.IO;
 using System.Runtime.InteropServices;
@@ -43,6 +44,9 @@ public sealed record QualificationEnvironment
     /// <summary>The name of the activity model.</summary>
     public required string ActivityModel { get; init; }
 
+    /// <summary>The ids of the sets of ion pairs that were asked for; <see langword="null"/> for the defaults of the activity model.</summary>
+    public IReadOnlyList<string>? PairSets { get; init; }
+
     internal static QualificationEnvironment Of(Predictor predictor) => new()
     {
         Software = SoftwareIdentity.Running,
@@ -56,6 +60,7 @@ public sealed record QualificationEnvironment
         Table = predictor.Table.Identity,
         Method = predictor.Method.Name,
         ActivityModel = predictor.ActivityModel.Name,
+        PairSets = predictor.PairSets,
     };
 
     private static string HashOfAssembly()

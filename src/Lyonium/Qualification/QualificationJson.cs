@@ -47,7 +47,8 @@ internal sealed record EnvironmentEntry(
     string Culture,
     EnvironmentTableEntry Table,
     string Method,
-    string ActivityModel);
+    string ActivityModel,
+    IReadOnlyList<string>? PairSets);
 
 internal sealed record QualificationDocument(
     string Format,
@@ -97,7 +98,8 @@ internal static class QualificationJson
             one.Table.Sha256,
             one.Table.Layers.Select(layer => new EnvironmentLayerEntry(layer.Name, layer.Edition, layer.Sha256)).ToArray()),
         one.Method,
-        one.ActivityModel);
+        one.ActivityModel,
+        one.PairSets);
 
     private static CheckEntry Describe(CheckOutcome one) => new(
         one.Check.Id,

@@ -53,6 +53,7 @@ internal sealed class QualificationText(QualificationReport report)
             .. table.Layers.Select(layer => ("own table", $"{layer.Name}, edition {layer.Edition}, SHA-256 {layer.Sha256}")),
             ("method", environment.Method),
             ("activity", environment.ActivityModel),
+            ("ion pairs", environment.PairSets is null ? "the defaults of the activity model" : environment.PairSets.Count == 0 ? "none" : string.Join(", ", environment.PairSets)),
         ];
         foreach (var (name, value) in lines)
         {

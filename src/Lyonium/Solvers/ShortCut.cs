@@ -100,7 +100,7 @@ internal static class ShortCut
 
         return equilibrium.Species.All(species => species.IsRung)
             ? SolverOutcome.Without(SolverStatus.FixedActivity, "a component at a fixed activity")
-            : SolverOutcome.Without(SolverStatus.CoupledSpecies, "a species over more than one component");
+            : SolverOutcome.Without(SolverStatus.CoupledSpecies, "ion pairs, dimers or polymers");
     }
 
     private static bool TrySpeciate(Equilibrium equilibrium, IActivityModel model, double pH, out Speciation? speciation)

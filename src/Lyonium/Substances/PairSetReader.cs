@@ -4,12 +4,17 @@ using System.Globalization;
 using System.Linq;
 using Lyonium.Documents;
 using Lyonium.Faults;
+using Lyonium.Quantities;
 
 namespace Lyonium.Substances;
 
 /// <summary>Reads interaction coefficients and sets of ion pairs, and holds them to the families that there are.</summary>
 internal sealed class PairSetReader
 {
+    private const double LargestLog10K = 100;
+    private const double LargestKgPerMol = 5;
+    private const int MostOfOne = 12;
+
     private readonly SourcedValueReader _values;
     private readonly Dictionary<string, ChemicalFormula?> _forms = new(StringComparer.Ordinal);
 
@@ -42,6 +47,11 @@ internal sealed class PairSetReader
                 continue;
             }
 
+            if (!(Math.Abs(value.Value) <= LargestKgPerMol))
+            {
+                Refuse(place, NumberText.Shortest(value.Value), "an interaction coefficient lies between -5 and 5 kg/mol");
+            }
+
             if (seen.Add((cation, anion)))
             {
                 read.Add(new InteractionCoefficient(cation, anion, value, Layer: null));
@@ -71,6 +81,11 @@ internal sealed class PairSetReader
                 continue;
             }
 
+            if (species.Length == 0 || models.Length == 0 || id == "none")
+            {
+                Refuse(place, id, "a set has species and models, and is not called none");
+            }
+
             if (sets.Any(one => string.Equals(one.Id, id, StringComparison.Ordinal)))
             {
                 place.Faults.Add(FaultKinds.TableDuplicate, place.Path + ".id", id, ("owner", "another set"));
@@ -81,6 +96,15 @@ internal sealed class PairSetReader
         }
 
         return sets;
+    }
+
+    /// <summary>Tells each id that stands twice among the pairs of all sets, layers laid over each other.</summary>
+    public static void CheckIds(IEnumerable<PairSet> sets, JsonPlace root)
+    {
+        foreach (var id in sets.SelectMany(set => set.Species.Select(one => one.Id)).GroupBy(id => id, StringComparer.Ordinal).Where(group => group.Count() > 1))
+        {
+            root.Faults.Add(FaultKinds.TableDuplicate, root.Path + ".pairSets", id.Key, ("owner", "another pair"));
+        }
     }
 
     private PairedSpecies? ReadSpecies(JsonPlace place)
@@ -99,6 +123,16 @@ internal sealed class PairSetReader
         {
             place.Faults.Add(FaultKinds.TableBadFormula, formulaPlace.Path, text, ("detail", detail));
             return null;
+        }
+
+        if (IsAForm(formedFrom))
+        {
+            Refuse(formulaPlace, text, "a pair is made of at least two species, not all of them water, and is no form of a family already");
+        }
+
+        if (!(Math.Abs(log10K.Value) <= LargestLog10K))
+        {
+            Refuse(place, NumberText.Shortest(log10K.Value), "log10 K lies between -100 and 100");
         }
 
         var charge = formedFrom.Sum(one => one.Value * ChargeOf(one.Key));
@@ -120,13 +154,40 @@ internal sealed class PairSetReader
             {
                 part.Value.Faults.Add(FaultKinds.TableUnknownFamily, part.Value.Path, part.Key);
             }
-            else if (part.Value.WholeNumber() is int count && count != 0)
+            else if (part.Value.WholeNumber() is int count)
             {
-                read.Add(new KeyValuePair<string, int>(part.Key, count));
+                if (count is >= 1 and <= MostOfOne)
+                {
+                    read.Add(new KeyValuePair<string, int>(part.Key, count));
+                }
+                else
+                {
+                    Refuse(part.Value, NumberText.Shortest(count), "a count lies between 1 and 12");
+                }
             }
         }
 
         return read.Count == 0 ? null : read.ToArray();
+    }
+
+    // One species of a family with the ions of water is a rung of its ladder: refused where the ladder has that rung.
+    private bool IsAForm(KeyValuePair<string, int>[] formedFrom)
+    {
+        var others = formedFrom.Where(part => !part.Key.StartsWith("water:", StringComparison.Ordinal)).ToArray();
+        if (others.Length == 0 || formedFrom.Sum(part => part.Value) < 2)
+        {
+            return true;
+        }
+
+        if (others.Length > 1 || others[0].Value > 1)
+        {
+            return false;
+        }
+
+        var parts = others[0].Key.Split(':');
+        var protons = int.Parse(parts[1], CultureInfo.InvariantCulture)
+            + formedFrom.Sum(part => part.Key == "water:2" ? part.Value : part.Key == "water:0" ? -part.Value : 0);
+        return _forms.ContainsKey(parts[0] + ":" + protons.ToString(CultureInfo.InvariantCulture));
     }
 
     private string? SpeciesId(JsonPlace? place, Func<int, bool> hasCharge)

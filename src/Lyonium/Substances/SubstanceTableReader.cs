@@ -39,6 +39,7 @@ internal static class SubstanceTableReader
         var pairs = new PairSetReader(values, families);
         var interactions = pairs.ReadInteractions(Optional(properties, "interactions"));
         var sets = pairs.ReadPairSets(Optional(properties, "pairSets"));
+        PairSetReader.CheckIds(sets, root);
         return faults.Any || edition is null
             ? faults.Attempt<SubstanceTable>(null)
             : new Attempt<SubstanceTable>(new SubstanceTable(
@@ -67,6 +68,8 @@ internal static class SubstanceTableReader
         var pairs = new PairSetReader(values, families);
         var ownInteractions = pairs.ReadInteractions(Optional(properties, "interactions")).Select(one => one with { Layer = name }).ToArray();
         var ownSets = pairs.ReadPairSets(Optional(properties, "pairSets")).Select(one => one with { Layer = name }).ToArray();
+        var allSets = Over(below.PairSets, ownSets, one => one.Id);
+        PairSetReader.CheckIds(allSets, root);
         if (faults.Any || edition is null)
         {
             return faults.Attempt<SubstanceTable>(null);
@@ -82,7 +85,7 @@ internal static class SubstanceTableReader
                 families,
                 Over(kept, own, one => one.Id),
                 Over(below.Interactions, ownInteractions, one => one.Cation + " " + one.Anion),
-                Over(below.PairSets, ownSets, one => one.Id)));
+                allSets));
     }
 
     private static (JsonPlace Root, IReadOnlyDictionary<string, JsonPlace> Properties, string Version, string? Edition, string Sha256)? Open(

@@ -127,6 +127,65 @@ public sealed class PairSetTests
         Assert.StartsWith("LYO06", Assert.Single(shortCut.TryPredict(RecipeJson.Read(RecipeText.With(Lime))).Faults).Code, StringComparison.Ordinal);
     }
 
+    // Sodium citrate with specific interactions, over the whole range that is stated: settled, or the method says why, and never a failure.
+    [Theory]
+    [InlineData("25 Cel")]
+    [InlineData("100 Cel")]
+    public void SodiumCitrate_withSpecificInteractions_isAnsweredOverTheRange(string temperature)
+    {
+        foreach (var amount in new[] { "0.01", "0.05", "0.1", "0.15", "0.19", "0.2", "0.25", "0.3", "0.4" })
+        {
+            var recipe = RecipeJson.Read(RecipeText.With(
+                $"{{ \"substance\": \"trisodium citrate dihydrate\", \"amount\": \"{amount} mol\" }}, {{ \"substance\": \"calcium chloride\", \"amount\": \"0.001 mol\" }}, " + Kilogram,
+                $"\"temperature\": \"{temperature}\""));
+            var attempt = new Predictor().With(new SpecificIonModel()).TryPredict(recipe);
+
+            Assert.True(attempt.Success, amount + ": " + string.Join("; ", attempt.Success ? [] : attempt.Faults.Select(fault => fault.Found)));
+        }
+    }
+
+    [Theory]
+    [InlineData("{ \"chloride:0\": -1, \"sodium:0\": 1 }")]
+    [InlineData("{ \"chloride:0\": 0, \"sodium:0\": 1 }")]
+    [InlineData("{ \"water:2\": 2 }")]
+    [InlineData("{ \"sodium:0\": 1 }")]
+    [InlineData("{ \"acetate:0\": 1, \"water:2\": 1 }")]
+    public void TryLayer_pairThatIsNone_isRefused(string formedFrom)
+    {
+        var table = $$"""
+            { "format": "lyonium-table/1.1", "edition": "1", "sources": [ { "key": "own", "citation": "own" } ],
+              "pairSets": [ { "id": "own-pairs", "name": "own", "models": [ "davies" ], "isDefault": true, "species": [
+                { "id": "own-pair", "formula": "NaCl", "formedFrom": {{formedFrom}}, "log10K": { "value": 1, "source": "own", "known": "read" } } ] } ] }
+            """;
+
+        Assert.Contains(SubstanceTable.Default.TryLayer("own", new MemoryStream(Encoding.UTF8.GetBytes(table))).Faults, fault => fault.Code == "LYO0318");
+    }
+
+    [Fact]
+    public void TryLayer_pairIdThatIsTaken_isRefused()
+    {
+        const string table = """
+            { "format": "lyonium-table/1.1", "edition": "1", "sources": [ { "key": "own", "citation": "own" } ],
+              "pairSets": [ { "id": "own-pairs", "name": "own", "models": [ "davies" ], "isDefault": true, "species": [
+                { "id": "calcium-hydroxide-pair", "formula": "CaOH^+", "formedFrom": { "calcium:0": 1, "water:0": 1 }, "log10K": { "value": 1, "source": "own", "known": "read" } } ] } ] }
+            """;
+
+        Assert.Equal("LYO0312", Assert.Single(SubstanceTable.Default.TryLayer("own", new MemoryStream(Encoding.UTF8.GetBytes(table))).Faults).Code);
+    }
+
+    [Fact]
+    public void ModelUncertainty_withAnOwnSet_isNotStated()
+    {
+        const string table = """
+            { "format": "lyonium-table/1.1", "edition": "1", "sources": [ { "key": "own", "citation": "own" } ],
+              "pairSets": [ { "id": "hydroxide-pairs", "name": "own", "models": [ "davies" ], "isDefault": false, "species": [
+                { "id": "own-pair", "formula": "CaOH^+", "formedFrom": { "calcium:0": 1, "water:0": 1 }, "log10K": { "value": 1, "source": "own", "known": "read" } } ] } ] }
+            """;
+        var layered = SubstanceTable.Default.TryLayer("own", new MemoryStream(Encoding.UTF8.GetBytes(table))).GetValueOrThrow();
+
+        Assert.Null(Of(new Predictor(layered), Lime).ModelUncertainty);
+    }
+
     [Theory]
     [InlineData("\"formula\": \"CaOH^2+\"", "LYO0318")]
     [InlineData("\"formula\": \"CaOH^+\", \"colour\": 1", "LYO0205")]

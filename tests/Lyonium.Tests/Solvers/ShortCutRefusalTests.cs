@@ -26,7 +26,7 @@ public sealed class ShortCutRefusalTests
                 ],
                 Water),
             SolverStatus.CoupledSpecies,
-            "more than one component");
+            "ion pairs");
 
     [Theory]
     [MemberData(nameof(Methods))]
