@@ -50,7 +50,7 @@ internal ref struct ChargeBalance
         _ladders = equilibrium.Ladders;
         _groups = equilibrium.Groups;
         _model = model;
-        _dependsOnMolalities = (model.Uses & IonData.Interactions) != 0;
+        _dependsOnMolalities = (model.Uses & IonData.Interactions) != IonData.None;
         _ionProduct = Math.Pow(10, -equilibrium.Solvent.PKw);
         var species = equilibrium.SpeciesCount;
         var rungs = _ladders.Species.Length;
